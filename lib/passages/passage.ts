@@ -84,6 +84,7 @@ export type FlagCode =
   | 'forecast-over'
   | 'wind-not-known'
   | 'stream-not-known'
+  | 'no-stream-given'
   | 'never-reached'
   | 'land-on-track'
   | 'land-not-checked'
