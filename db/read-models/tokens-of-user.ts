@@ -22,3 +22,13 @@ export async function listTokensOfUser(db: Knex, userId: string): Promise<readon
     revokedAt: row.revoked_at,
   }));
 }
+
+/** How many of the person's tokens are not revoked. */
+export async function countLiveTokens(db: Knex, userId: string): Promise<number> {
+  const row = await db('personal_tokens')
+    .where({ user_id: userId })
+    .whereNull('revoked_at')
+    .count<{ count: string }>({ count: '*' })
+    .first();
+  return Number(row?.count ?? 0);
+}

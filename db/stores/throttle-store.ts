@@ -43,3 +43,8 @@ function limiterOf(db: Knex, rule: ThrottleRule): RateLimiterPostgres {
   ofDb.set(rule.name, limiter);
   return limiter;
 }
+
+/** Takes one counted try back: it was no guess. */
+export async function giveBackTry(db: Knex, rule: ThrottleRule, key: string): Promise<void> {
+  await limiterOf(db, rule).reward(key, 1);
+}

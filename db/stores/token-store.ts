@@ -20,7 +20,7 @@ export async function revokeToken(db: Knex, userId: string, tokenId: string, now
 }
 
 /** The person behind a token that is not revoked; notes the use, at most once a minute. */
-export async function useToken(
+export async function recordTokenUse(
   db: Knex,
   tokenHash: Buffer,
   now: Date,
