@@ -29,6 +29,7 @@ export interface LandIndex {
 
 /** Long lines are asked about in pieces of this length, so that the first meeting ends the search. */
 const PIECE_M = 2000;
+const MILLIMETRE_DEG = 1e-8;
 
 /**
  * Builds the index from closed rings, longitude first. They are laid on the ellipsoidal Mercator plane, where rhumb
@@ -47,7 +48,11 @@ export function buildLandIndex(polygons: readonly LandPolygon[], box: Box): Land
 
   const isLand = (point: Position) => {
     if (!covers(point) || !tree) return false;
-    const { east: x, north: y } = toPlane(point);
+    // A place on the very edge of the box is taken a millimetre inside, where a ray can tell land from water.
+    const { east: x, north: y } = toPlane({
+      lat: clamp(point.lat, box.south + MILLIMETRE_DEG, box.north - MILLIMETRE_DEG),
+      lon: clamp(point.lon, box.west + MILLIMETRE_DEG, box.east - MILLIMETRE_DEG),
+    });
     // Counted per polygon, so that two that overlap by a hair do not cancel each other.
     const inside = new Set<number>();
     tree.search(x, y, eastEdge, y, (i) => {
@@ -95,6 +100,10 @@ export function buildLandIndex(polygons: readonly LandPolygon[], box: Box): Land
   };
 
   return { covers, isLand, crossesLand, distanceToShoreM };
+}
+
+function clamp(value: number, least: number, most: number): number {
+  return Math.min(most, Math.max(least, value));
 }
 
 function buildTree(land: LandSegments): Flatbush | null {
