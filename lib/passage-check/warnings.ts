@@ -46,7 +46,10 @@ function boatWarnings({ boat, stream }: Passage, hasCurve: boolean): Warning[] {
   }
   if (stream.kind === 'none') {
     warnings.push(
-      warn(flagAt('no-stream-given', 'notice', null), 'No stream was given: the check leaves it out. Judge it yourself.'),
+      warn(
+        flagAt('no-stream-given', 'notice', null),
+        'No stream was given: the check leaves it out. Judge it yourself.',
+      ),
     );
   }
   return warnings;

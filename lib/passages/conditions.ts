@@ -14,8 +14,7 @@ export interface Conditions {
 export type UnknownReason = 'wind-before-first' | 'wind-over' | 'wind-shift' | 'stream';
 
 export type ConditionsAt =
-  | { readonly known: true; readonly conditions: Conditions }
-  | { readonly known: false; readonly reason: UnknownReason };
+  { readonly known: true; readonly conditions: Conditions } | { readonly known: false; readonly reason: UnknownReason };
 
 const REASONS = { 'before-first': 'wind-before-first', over: 'wind-over', shift: 'wind-shift' } as const;
 

@@ -44,7 +44,12 @@ export function shuntDisplacementM({ boat, wind, streamKn }: SailingConditions):
  * drifting where neither makes good anything. `present` is the end she leads with now, null before the departure.
  * Where direct asks for the other end, it must still hold from where the shunt leaves her. docs/model.md §6.
  */
-export function sailingToward(place: Place, target: Place, present: End | null, conditions: SailingConditions): Sailing {
+export function sailingToward(
+  place: Place,
+  target: Place,
+  present: End | null,
+  conditions: SailingConditions,
+): Sailing {
   const angles = boardAngles(conditions.boat, conditions.wind.meanKn);
   const bearing = rhumbInverse(place, target).courseDeg;
   const direct = makeGood(bearing, conditions);

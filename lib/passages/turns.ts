@@ -32,7 +32,12 @@ export function offLineM(place: Place, { start, courseDeg }: Corridor): Metres {
 }
 
 /** When she turns on this board: at the corridor's edge or on the layline, both over the ground, whichever is first. */
-export function turnOutlook(place: Place, corridor: Corridor, boards: Boards, conditions: SailingConditions): TurnOutlook {
+export function turnOutlook(
+  place: Place,
+  corridor: Corridor,
+  boards: Boards,
+  conditions: SailingConditions,
+): TurnOutlook {
   const edge = edgeOutlook(place, corridor, boards);
   const layline = laylineOutlook(place, corridor, boards, conditions);
   return { due: edge.due || layline.due, inSeconds: Math.min(edge.inSeconds, layline.inSeconds) };
@@ -51,12 +56,7 @@ function edgeOutlook(place: Place, corridor: Corridor, boards: Boards): TurnOutl
  * The layline allows for the shunt's own drift, so that she lies on it when she gathers way. Where that leaves no
  * turn to make (the target nearer than the drift), the plain layline serves.
  */
-function laylineOutlook(
-  place: Place,
-  corridor: Corridor,
-  boards: Boards,
-  conditions: SailingConditions,
-): TurnOutlook {
+function laylineOutlook(place: Place, corridor: Corridor, boards: Boards, conditions: SailingConditions): TurnOutlook {
   const offset = mercatorOffsetM(place, corridor.target);
   const allowed = sharesOf(subtract(offset, shuntDisplacementM(conditions)), boards);
   const [onThis, onOther] = allowed[1] > LAYLINE_SLACK_S ? allowed : sharesOf(offset, boards);

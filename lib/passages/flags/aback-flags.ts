@@ -12,7 +12,9 @@ const NEAR_SHARE = 0.8;
 export function abackFlags({ prepared, followed }: LegContext): Flag[] {
   const isDeep = ({ decision }: Sample) =>
     decision.sailing.course !== null && Math.abs(decision.sailing.course.windAngleDeg) >= DEEP_DEG;
-  const deepest = worstSample(followed.samples, isDeep, (sample) => Math.abs(sample.decision.sailing.course!.windAngleDeg));
+  const deepest = worstSample(followed.samples, isDeep, (sample) =>
+    Math.abs(sample.decision.sailing.course!.windAngleDeg),
+  );
   if (!deepest) return [];
   const limitOf = (sample: Sample) => prepared.abackLimitsKn[sample.decision.reefIndex] ?? null;
   const windAngleDeg = Math.abs(deepest.decision.sailing.course!.windAngleDeg);

@@ -10,12 +10,20 @@ export function limitFlags({ passage, followed }: LegContext): Flag[] {
   const flags: Flag[] = [];
   if (limits.meanKn !== undefined) {
     const limit = limits.meanKn;
-    const worst = worstSample(samples, ({ wind }) => wind.meanKn > limit, ({ wind }) => wind.meanKn);
+    const worst = worstSample(
+      samples,
+      ({ wind }) => wind.meanKn > limit,
+      ({ wind }) => wind.meanKn,
+    );
     if (worst) flags.push(flagAt('over-mean-limit', 'danger', worst, { meanKn: worst.wind.meanKn, limitKn: limit }));
   }
   if (limits.gustKn !== undefined) {
     const limit = limits.gustKn;
-    const worst = worstSample(samples, ({ wind }) => wind.gustKn > limit, ({ wind }) => wind.gustKn);
+    const worst = worstSample(
+      samples,
+      ({ wind }) => wind.gustKn > limit,
+      ({ wind }) => wind.gustKn,
+    );
     if (worst) flags.push(flagAt('over-gust-limit', 'danger', worst, { gustKn: worst.wind.gustKn, limitKn: limit }));
   }
   if (limits.loadShare !== undefined) {

@@ -8,7 +8,11 @@ export function loadFlags({ prepared, followed }: LegContext): Flag[] {
   const add = (code: Flag['code'], severity: Flag['severity'], passes: (sample: Sample) => boolean) => {
     const worst = worstSample(followed.samples, passes, (sample) => sample.decision.load.loadShare);
     if (!worst) return;
-    const numbers = { ...numbersOf(worst), workingMargin: prepared.boat.workingMargin, minutes: minutesWhere(followed, passes) };
+    const numbers = {
+      ...numbersOf(worst),
+      workingMargin: prepared.boat.workingMargin,
+      minutes: minutesWhere(followed, passes),
+    };
     flags.push(flagAt(code, severity, worst, numbers));
   };
   add('beyond-righting-moment', 'danger', ({ decision }) => decision.load.state === 'beyond');
