@@ -38,6 +38,7 @@ const config = [
   {
     ignores: [
       '.next/**',
+      '.next-test/**',
       '.local/**',
       'node_modules/**',
       'coverage/**',
