@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import type { FeatureCollection, Polygon } from 'geojson';
 import type { Box, LandPolygon, LonLat } from '@/lib/geo/land-file';
+import type { Place } from './chart-layers';
 
 export const SOURCE_DIR = path.join(import.meta.dirname, '../../data/sample-region');
 
@@ -20,4 +21,10 @@ export async function readRegionLand(): Promise<LandPolygon[]> {
     await readFile(path.join(SOURCE_DIR, 'land.geojson'), 'utf8'),
   ) as FeatureCollection<Polygon>;
   return source.features.map((feature) => feature.geometry.coordinates as unknown as LonLat[][]);
+}
+
+/** Names to draw on the map. */
+export async function readPlaces(): Promise<readonly Place[]> {
+  const source = JSON.parse(await readFile(path.join(SOURCE_DIR, 'places.json'), 'utf8')) as { places: Place[] };
+  return source.places;
 }
