@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { boatFields, massSchema } from '@/lib/schemas/boat';
 import { findBoatContradictions } from '@/lib/schemas/boat-contradictions';
-import { nameField } from '@/lib/schemas/number-field';
+import { isStorable, nameField } from '@/lib/schemas/number-field';
 
 export const massKinds = ['structure', 'rig', 'stores', 'crew', 'ballast'] as const;
 export type MassKind = (typeof massKinds)[number];
@@ -14,7 +14,11 @@ export const boatSheetSchema = z
       .array(massSchema.extend({ kind: z.enum(massKinds, { error: 'Kind: choose one of the list.' }) }))
       .min(1, { error: 'Masses: give at least one item.' })
       .max(200),
-    notes: z.string().max(4000, { error: 'Notes: at most 4,000 characters.' }).default(''),
+    notes: z
+      .string()
+      .max(4000, { error: 'Notes: at most 4,000 characters.' })
+      .refine(isStorable, { error: 'Notes: they hold characters that cannot be shown. Type them again.' })
+      .default(''),
   })
   .superRefine(findBoatContradictions);
 

@@ -29,7 +29,15 @@ export function nameField(what: string, max = 80) {
     .string({ error: `${what}: give a text.` })
     .trim()
     .min(1, { error: `${what}: give at least one character.` })
-    .max(max, { error: `${what}: at most ${max} characters.` });
+    .max(max, { error: `${what}: at most ${max} characters.` })
+    .refine((text) => isStorable(text) && !/[\n\r\t]/.test(text), {
+      error: `${what}: it holds characters that cannot be shown. Type it again on one line.`,
+    });
+}
+
+/** No control characters and no halves of characters: PostgreSQL stores neither. Line ends and tabs may stand. */
+export function isStorable(text: string): boolean {
+  return !/[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/.test(text) && !/\p{Cs}/u.test(text);
 }
 
 /** ISO 8601 with an offset, e.g. 2026-06-01T16:00:00Z or 2026-06-01T09:00:00-07:00. */
