@@ -12,7 +12,7 @@ export interface BestAngle {
   readonly speedKn: Knots;
 }
 
-/** A wave or a shift must not bring the wind to the wrong side: the deepest angle where the owner gives none. [K] */
+/** A wave or a shift must not bring the wind to the wrong side: the deepest angle where the owner gives none. Judgement, no source. */
 export const DEEPEST_DEFAULT_DEG: Degrees = 150;
 
 /** The angle up to 90° of the best speed made good to windward in this wind. Source: docs/model.md §5. */

@@ -33,6 +33,7 @@ const SEARCH_STEP_KN: Knots = 0.5;
  * The mean wind over the water up to which a reef holds, 0–120 kn: k·HM0 = RM0, its gust being mean × gust factor
  * and the boat's speed that of the mean. At the worst of the given true wind angles, and at each. The least wind that
  * is too much counts, even where a faster boat would find a stronger one easier again. 0 where nothing rights her.
+ * It is the wind at the centre of effort, without stream or leeway.
  * Source: docs/model.md §§3–4.
  * @throws RangeError without any angle.
  */
