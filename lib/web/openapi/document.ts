@@ -1,6 +1,8 @@
 import { OpenApiGeneratorV31, OpenAPIRegistry } from '@asteasolutions/zod-to-openapi';
+import { registerBoatPaths } from '@/lib/web/openapi/boat-paths';
 import { registerCheckPaths } from '@/lib/web/openapi/check-paths';
 import { registerHealthPaths } from '@/lib/web/openapi/health-paths';
+import { registerPassagePaths } from '@/lib/web/openapi/passage-paths';
 
 const sessionCookie = 'next-auth.session-token';
 
@@ -19,6 +21,8 @@ export function openApiDocument() {
     description: 'A personal token, made under Account.',
   });
   registerCheckPaths(registry);
+  registerBoatPaths(registry);
+  registerPassagePaths(registry);
   registerHealthPaths(registry);
   return new OpenApiGeneratorV31(registry.definitions).generateDocument({
     openapi: '3.1.0',
