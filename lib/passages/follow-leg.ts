@@ -13,7 +13,7 @@ import type { EpochMs, Knots } from '@/lib/units/quantities';
 
 const LONGEST_STEP_MS = 5 * MS_PER_MINUTE;
 /** Passing a waypoint this close on a board is reaching it: nobody shunts twice for the last metres. */
-const REACHED_WITHIN_M = 50;
+const REACHED_WITHIN_M = 25;
 const ARRIVED_WITHIN_M = 0.5;
 /** docs/model.md §6: after six hours under 0.2 kn made good the rest is not known. */
 const SLOW_KN = 0.2;

@@ -23,6 +23,9 @@ export interface CallTiming {
 /** Defaults, seamanship judgement without a source. docs/model.md §4. */
 export const DEFAULT_TIMING: CallTiming = { leadMs: 15 * MS_PER_MINUTE, holdMs: 30 * MS_PER_MINUTE };
 
+/** Two calls for less sail within this time are one call, straight to the deeper reef: nobody reefs twice in it. */
+const ONE_CALL_WITHIN_MS = 5 * MS_PER_MINUTE;
+
 /**
  * Calls over time from what each instant asks for. A deeper reef is called the lead time before it is needed, a
  * shallower one only after the lull has held: at any time the deepest reef asked for from `hold` ago to `lead`
@@ -52,6 +55,10 @@ export function callsOverTime(
     const before = calls[calls.length - 1];
     if (before?.reefIndex === reefIndex) continue;
     const deeper = !before || reefIndex > before.reefIndex;
+    if (before && deeper && calls.length > 1 && at - before.at < ONE_CALL_WITHIN_MS && before.by > before.at) {
+      calls[calls.length - 1] = { ...before, reefIndex };
+      continue;
+    }
     const asking = spans.find((span) => span.reefIndex === reefIndex && span.to > at);
     calls.push({ reefIndex, at, by: deeper ? Math.max(at, asking?.from ?? at) : at });
   }

@@ -45,7 +45,7 @@ export const windRowSchema = z.object({
 export const windRowsSchema = z
   .array(windRowSchema)
   .min(1, { error: 'Wind: give at least one row; steady wind needs two.' })
-  .max(5000)
+  .max(5000, { error: 'Wind: at most 5,000 rows.' })
   .superRefine(findWindContradictions);
 
 export const streamRowSchema = z.object({
@@ -56,8 +56,7 @@ export const streamRowSchema = z.object({
 
 export const streamRowsSchema = z
   .array(streamRowSchema)
-  .min(1, { error: 'Stream: give at least one row, or say there is none.' })
-  .max(5000)
+  .max(5000, { error: 'Stream: at most 5,000 rows.' })
   .superRefine(findStreamContradictions);
 
 export const windSchema = z.discriminatedUnion(
@@ -74,7 +73,13 @@ export const windSchema = z.discriminatedUnion(
 
 export const streamSchema = z.discriminatedUnion(
   'kind',
-  [z.object({ kind: z.literal('none') }), z.object({ kind: z.literal('series'), rows: streamRowsSchema })],
+  [
+    z.object({ kind: z.literal('none') }),
+    z.object({
+      kind: z.literal('series'),
+      rows: streamRowsSchema.min(1, { error: 'Stream: give at least one row, or say there is none.' }),
+    }),
+  ],
   { error: 'Stream: kind must be "none" or "series".' },
 );
 

@@ -16,7 +16,7 @@ export const passagePlanSchema = z.object({
     rows: windRowsSchema,
   }),
   /** Empty: no stream was entered, and the check says so. */
-  streamRows: z.union([z.tuple([]), streamRowsSchema]).default([]),
+  streamRows: streamRowsSchema.default([]),
   limits: limitsSchema.default({}),
 });
 

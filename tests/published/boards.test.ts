@@ -10,7 +10,14 @@ function beat(options: {
   readonly angleDeg: number;
 }) {
   const request = completeRequest();
-  request.boat.polar = { windSpeedsKn: [6, 18], windAnglesDeg: [40, 90, 150], speedsKn: [[4, 5, 4], [6, 8, 7]] };
+  request.boat.polar = {
+    windSpeedsKn: [6, 18],
+    windAnglesDeg: [40, 90, 150],
+    speedsKn: [
+      [4, 5, 4],
+      [6, 8, 7],
+    ],
+  };
   request.boat.closestAngleDeg = options.angleDeg;
   request.boat.shunt = { seconds: 0, driftKn: 0 };
   request.route = routeOf([options]);
@@ -65,7 +72,14 @@ describe('boards in the corridor', () => {
   // B07: counted by hand from the definition. Wind north, courses 045, 315, 045, 090, 200, 260: three changes of side.
   it('counts a shunt where the wind changes side', () => {
     const request = completeRequest();
-    request.boat.polar = { windSpeedsKn: [6, 18], windAnglesDeg: [30, 90, 170], speedsKn: [[4, 5, 4], [6, 8, 7]] };
+    request.boat.polar = {
+      windSpeedsKn: [6, 18],
+      windAnglesDeg: [30, 90, 170],
+      speedsKn: [
+        [4, 5, 4],
+        [6, 8, 7],
+      ],
+    };
     request.boat.closestAngleDeg = 30;
     request.boat.deepestAngleDeg = 170;
     request.route = routeOf([45, 315, 45, 90, 200, 260].map((courseDeg) => ({ courseDeg, nmi: 2 })));

@@ -70,7 +70,9 @@ describe('three legs with a beat between', () => {
   });
 
   it('calls the reefs', () => {
-    const called = legs.map((leg) => limits.reefs.findIndex((reef: { name: string }) => reef.name === leg.reefCalls[0]!.reef));
+    const called = legs.map((leg) =>
+      limits.reefs.findIndex((reef: { name: string }) => reef.name === leg.reefCalls[0]!.reef),
+    );
     expect(called.slice(0, 2)).toEqual(source.expected.reefIndex.slice(0, 2));
     // The source takes the course's own apparent wind at 150°; beam-on at rest asks for the next reef.
     expect(called[2]).toBe(source.expected.reefIndex[2] + 1);
