@@ -16,6 +16,8 @@ export interface PassageLine {
   readonly state: CheckState | null;
   readonly largestLoadShare: number | null;
   readonly worstLeg: { readonly position: number; readonly from: string; readonly to: string } | null;
+  /** Of the forecast that check was made with: an old one no longer carries its state. */
+  readonly forecastIssuedAt: Date | null;
 }
 
 interface Filter {
@@ -35,7 +37,8 @@ export async function listPassagesOfUser(
     .joinRaw(
       `LEFT JOIN LATERAL (SELECT state, largest_load_share, worst_leg_position,
            result #>> ARRAY['legs', worst_leg_position::text, 'from'] AS worst_from,
-           result #>> ARRAY['legs', worst_leg_position::text, 'to'] AS worst_to
+           result #>> ARRAY['legs', worst_leg_position::text, 'to'] AS worst_to,
+           (SELECT issued_at FROM forecasts WHERE forecasts.id = passage_checks.forecast_id) AS issued_at
          FROM passage_checks WHERE passage_id = passages.id
          ORDER BY passage_revision DESC, created_at DESC LIMIT 1) newest ON true`,
     )
@@ -51,6 +54,7 @@ export async function listPassagesOfUser(
       'newest.worst_leg_position',
       'newest.worst_from',
       'newest.worst_to',
+      'newest.issued_at as forecast_issued_at',
     );
   if (boatId !== undefined) query.where('passages.boat_id', boatId);
   if (which.hidden) query.where('passages.hidden_at', '>', which.since);
@@ -72,5 +76,6 @@ export async function listPassagesOfUser(
       row.worst_leg_position === null
         ? null
         : { position: row.worst_leg_position, from: row.worst_from, to: row.worst_to },
+    forecastIssuedAt: row.forecast_issued_at,
   }));
 }

@@ -1,0 +1,98 @@
+'use client';
+
+import { useMemo, useState } from 'react';
+import { PassageStrip } from '@/components/charts/passage-strip';
+import type { BoatSheet } from '@/lib/schemas/boat-sheet';
+import type { PassagePlan } from '@/lib/schemas/passage-plan';
+import { draftFromPlan } from './draft-from-plan';
+import { placeOfWaypoint } from './leg-measures';
+import { NotebookSection } from './notebook-section';
+import { PlanFields } from './plan-fields';
+import { PlannerFormProvider } from './planner-context';
+import { PlannerMap } from './planner-map';
+import { PlannerVerdict } from './planner-verdict';
+import { ResultView } from './result-view';
+import { SaveBar } from './save-bar';
+import { usePlanner } from './use-planner';
+
+export interface PlannerProps {
+  readonly passage: PassagePlan & { readonly id: string; readonly revision: number };
+  readonly boat: { readonly name: string; readonly sheetNumber: number; readonly sheet: BoatSheet };
+}
+
+/** The planner: map and strip, the plan in fields, and the check of what is typed just now. */
+export function Planner({ passage, boat }: PlannerProps) {
+  const [draft] = useState(() => draftFromPlan(passage, 'UTC'));
+  const { sheet } = boat;
+  const planner = usePlanner({ passageId: passage.id, revision: passage.revision, draft, sheet });
+  const { form, check } = planner;
+  const [selectedLeg, setSelectedLeg] = useState<number | null>(null);
+  const [focusPoint, setFocusPoint] = useState<{ readonly lat: number; readonly lon: number } | null>(null);
+  const { plan } = form.reading;
+  const current = useMemo(
+    () => (check.status === 'current' && plan ? { result: check.result, plan, gustFactor: sheet.gustFactor } : null),
+    [check, plan, sheet.gustFactor],
+  );
+  const waypoints = useMemo(
+    () =>
+      form.draft.waypoints.flatMap(({ id, name }, index) => {
+        const place = placeOfWaypoint(form.draft, index);
+        return place ? [{ id, name, index, ...place }] : [];
+      }),
+    [form.draft],
+  );
+  const { dispatch } = form;
+  return (
+    <PlannerFormProvider value={form}>
+      <SaveBar planner={planner} passageId={passage.id} />
+      <p className="text-muted mb-4 text-sm">
+        {boat.name}, boat sheet {boat.sheetNumber}. The check follows every change; saving stores it.
+      </p>
+      <PlannerVerdict planner={planner} reefNames={sheet.reefs.map((reef) => reef.name)} />
+      <div className="mt-6 grid gap-8 lg:grid-cols-[minmax(0,11fr)_minmax(0,9fr)]">
+        <div className="min-w-0 space-y-6">
+          <PlannerMap
+            waypoints={waypoints}
+            check={current}
+            selectedLeg={selectedLeg}
+            focusPoint={focusPoint}
+            onAddWaypoint={(place) => dispatch({ type: 'addWaypoint', ...place })}
+            onMoveWaypoint={(id, place) => dispatch({ type: 'moveWaypoint', id, ...place })}
+            onInsertWaypoint={(shownLeg, place) => {
+              // A waypoint whose place does not read is not on the map, so the map counts fewer legs.
+              const legIndex = waypoints[shownLeg]?.index;
+              if (legIndex !== undefined) dispatch({ type: 'insertWaypoint', legIndex, ...place });
+            }}
+            onSelectLeg={setSelectedLeg}
+          />
+          <NotebookSection title="Passage strip">
+            {current ? (
+              <PassageStrip
+                {...current}
+                selectedLeg={selectedLeg}
+                onSelectLeg={setSelectedLeg}
+                onFocus={setFocusPoint}
+              />
+            ) : (
+              <p className="text-muted text-sm">
+                The legs are laid along time here as soon as track, departure and wind can be checked.
+              </p>
+            )}
+          </NotebookSection>
+        </div>
+        <PlanFields />
+      </div>
+      {current && (
+        <div className="mt-10">
+          <ResultView
+            result={current.result}
+            plan={current.plan}
+            sheet={sheet}
+            selectedLeg={selectedLeg}
+            onSelectLeg={setSelectedLeg}
+          />
+        </div>
+      )}
+    </PlannerFormProvider>
+  );
+}
