@@ -13,6 +13,7 @@ export default {
         muted: 'var(--muted)',
         line: 'var(--line)',
         spruce: 'var(--spruce)',
+        'on-spruce': 'var(--on-spruce)',
         within: 'var(--within)',
         thin: 'var(--thin)',
         beyond: 'var(--beyond)',
