@@ -89,14 +89,14 @@ export function LegsTable({ facts, workingMargin, selectedLeg, onSelectLeg }: Le
   );
 }
 
-/** Load share with its small beam, and the share beam-on at rest where it counts. */
+/** Load share with its small beam, and the share beam-on at rest where it counts. What is not known has no beam to show. */
 export function LoadShare({ row, workingMargin }: { readonly row: LegFacts; readonly workingMargin: number }) {
   const { leg } = row;
   return (
     <>
       <span className="flex items-center gap-2">
         <span className="font-bold">{row.loadShare}</span>
-        {leg.largestLoadShare !== null && (
+        {leg.largestLoadShare !== null && leg.state !== 'unknown' && (
           <Beam
             size="small"
             loadShare={leg.largestLoadShare}

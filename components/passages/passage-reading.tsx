@@ -70,7 +70,14 @@ function StoredCheck({ passage, check, boat, nowMs }: StoredCheckProps) {
         <Verdict result={now.result} plan={passage} reefNames={check.sheet.reefs.map((reef) => reef.name)} />
         <CheckOrigin check={check} boat={boat} passage={passage} now={now} nowMs={nowMs} />
       </div>
-      <PlannerMap waypoints={waypoints} check={shown} focusPoint={focusPoint} readOnly {...select} />
+      <PlannerMap
+        waypoints={waypoints}
+        corridors={passage.route.slice(1).map((one) => one.corridorHalfWidthM)}
+        check={shown}
+        focusPoint={focusPoint}
+        readOnly
+        {...select}
+      />
       <NotebookSection title="Passage strip">
         <PassageStrip {...shown} {...select} onFocus={setFocusPoint} />
       </NotebookSection>

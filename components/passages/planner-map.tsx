@@ -21,6 +21,9 @@ interface PlannerMapProps {
     readonly lat: number;
     readonly lon: number;
   }[];
+  /** Room to each side of the leg that ends at waypoint i + 1, m; where it does not read yet, none is drawn. */
+  readonly corridors: readonly number[];
+  readonly selectedWaypoint?: string | null;
   /** Null while there is no current check: then the map shows the waypoints alone. */
   readonly check: { readonly result: CheckResult; readonly plan: PassagePlan; readonly gustFactor: number } | null;
   readonly selectedLeg: number | null;
@@ -58,6 +61,8 @@ export function PlannerMap({ check, readOnly = false, focusPoint, ...rest }: Pla
         legs={drawn.legs}
         shunts={drawn.shunts}
         reefCalls={drawn.reefCalls}
+        corridors={rest.corridors}
+        selectedWaypoint={rest.selectedWaypoint ?? null}
         selectedLeg={rest.selectedLeg}
         theme={theme}
         readOnly={readOnly}
@@ -66,7 +71,7 @@ export function PlannerMap({ check, readOnly = false, focusPoint, ...rest }: Pla
         onInsertWaypoint={rest.onInsertWaypoint ?? nothing}
         onSelectLeg={rest.onSelectLeg}
         onSelectWaypoint={rest.onSelectWaypoint ?? nothing}
-        {...(focusPoint ? { focusPoint } : {})}
+        focusPoint={focusPoint}
       />
     </div>
   );

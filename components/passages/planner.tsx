@@ -9,6 +9,7 @@ import { placeOfWaypoint } from './leg-measures';
 import { NotebookSection } from './notebook-section';
 import { PlanFields } from './plan-fields';
 import { PlannerFormProvider } from './planner-context';
+import { readNumber } from './read-number';
 import { PlannerMap } from './planner-map';
 import { PlannerVerdict } from './planner-verdict';
 import { ResultView } from './result-view';
@@ -27,6 +28,7 @@ export function Planner({ passage, boat }: PlannerProps) {
   const planner = usePlanner({ passageId: passage.id, revision: passage.revision, draft, sheet });
   const { form, check } = planner;
   const [selectedLeg, setSelectedLeg] = useState<number | null>(null);
+  const [selectedWaypoint, setSelectedWaypoint] = useState<string | null>(null);
   const [focusPoint, setFocusPoint] = useState<{ readonly lat: number; readonly lon: number } | null>(null);
   const { plan } = form.reading;
   const current = useMemo(
@@ -35,9 +37,9 @@ export function Planner({ passage, boat }: PlannerProps) {
   );
   const waypoints = useMemo(
     () =>
-      form.draft.waypoints.flatMap(({ id, name }, index) => {
+      form.draft.waypoints.flatMap(({ id, name, corridor }, index) => {
         const place = placeOfWaypoint(form.draft, index);
-        return place ? [{ id, name, index, ...place }] : [];
+        return place ? [{ id, name, index, corridorM: corridorShown(corridor), ...place }] : [];
       }),
     [form.draft],
   );
@@ -53,6 +55,9 @@ export function Planner({ passage, boat }: PlannerProps) {
         <div className="min-w-0 space-y-6">
           <PlannerMap
             waypoints={waypoints}
+            corridors={waypoints.slice(1).map((waypoint) => waypoint.corridorM)}
+            selectedWaypoint={selectedWaypoint}
+            onSelectWaypoint={setSelectedWaypoint}
             check={current}
             selectedLeg={selectedLeg}
             focusPoint={focusPoint}
@@ -95,4 +100,10 @@ export function Planner({ passage, boat }: PlannerProps) {
       )}
     </PlannerFormProvider>
   );
+}
+
+/** Half-width to draw, m: none where it does not read or is no width at all. */
+function corridorShown(text: string): number {
+  const value = readNumber(text);
+  return value > 0 && value <= 50_000 ? value : 0;
 }

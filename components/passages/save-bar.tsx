@@ -18,10 +18,10 @@ export function SaveBar({ planner, passageId }: { readonly planner: Planner; rea
     <div className="border-line bg-ground sticky top-0 z-20 -mx-4 mb-4 border-b px-4 py-2" data-testid="save-bar">
       <div className="flex flex-wrap items-center gap-2">
         <SmallButton label="Undo" disabled={state.past.length === 0} onClick={() => dispatch({ type: 'undo' })}>
-          ↶<span className="ml-1 max-sm:sr-only">Undo</span>
+          Undo
         </SmallButton>
         <SmallButton label="Redo" disabled={state.future.length === 0} onClick={() => dispatch({ type: 'redo' })}>
-          ↷<span className="ml-1 max-sm:sr-only">Redo</span>
+          Redo
         </SmallButton>
         <span className="text-muted ml-auto text-sm" role="status" data-testid="saved-state">
           {saving.busy ? 'Saving…' : unsaved ? 'Not saved yet' : 'Saved'}

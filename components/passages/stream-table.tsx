@@ -71,7 +71,7 @@ export function StreamTable() {
                     label={`Take out stream row ${i + 1}`}
                     onClick={() => dispatch({ type: 'deleteStreamRow', id: row.id })}
                   >
-                    ✕
+                    ×
                   </SmallButton>
                 </td>
               </tr>

@@ -70,7 +70,7 @@ export function WaypointRow({ index, onSay }: WaypointRowProps) {
                 onSay(`${called} is deleted. Undo brings it back.`);
               }}
             >
-              ✕
+              ×
             </SmallButton>
           </span>
         </div>

@@ -139,7 +139,7 @@ function WindRow({ index }: { readonly index: number }) {
           label={`Take out wind row ${number}`}
           onClick={() => dispatch({ type: 'deleteWindRow', id: row.id })}
         >
-          ✕
+          ×
         </SmallButton>
       </td>
     </tr>
