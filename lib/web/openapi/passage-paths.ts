@@ -104,4 +104,11 @@ export function registerPassagePaths(registry: OpenAPIRegistry): void {
     request: { params },
     responses: { 200: answer('Checks', z.object({ checks: z.array(checkLine) })), ...problems(401, 404) },
   });
+  registry.registerPath({
+    ...common,
+    method: 'get',
+    path: '/api/sample-forecast',
+    summary: "The demo's invented wind for today; only where the demo is on",
+    responses: { 200: answer('Wind, as a plan holds it', passagePlanSchema.shape.wind), ...problems(401, 404) },
+  });
 }
