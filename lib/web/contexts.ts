@@ -18,8 +18,8 @@ export function contextOf(user: CurrentUser): Context {
 }
 
 /** The same where mail may be sent. */
-export async function mailingContext(): Promise<Context & { mail: MailSender; origin: string }> {
-  return { ...(await pageContext()), mail: mailSender, origin: ownOrigin() };
+export async function mailingContext(returnTo?: string): Promise<Context & { mail: MailSender; origin: string }> {
+  return { ...(await pageContext(returnTo)), mail: mailSender, origin: ownOrigin() };
 }
 
 /** Of somebody who is not signed in. */

@@ -1,12 +1,15 @@
 import 'server-only';
 import { cache } from 'react';
 import { getToken } from 'next-auth/jwt';
-import { cookies } from 'next/headers';
+import { cookies, headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { getDb } from '@/db/knex';
 import { env } from '@/lib/env';
 import { openSession } from '@/lib/usecases/accounts/open-session';
 import { authenticateToken } from '@/lib/usecases/tokens/authenticate-token';
+
+/** Set by proxy.ts on every page's request. */
+const PATH_HEADER = 'x-twobow-path';
 
 export interface CurrentUser {
   readonly id: string;
@@ -38,9 +41,13 @@ export const sessionUser = cache(async (): Promise<CurrentUser | null> => {
   return openSession(getDb(), token.sub, token.sessionVersion ?? 0);
 });
 
-/** For pages of signed-in people: goes to the sign-in page otherwise, and comes back to `returnTo` after it. */
+/**
+ * For pages of signed-in people: goes to the sign-in page otherwise, and comes back to `returnTo` after it,
+ * or to the page that was asked for (its path is told by proxy.ts).
+ */
 export async function requireUser(returnTo?: string): Promise<CurrentUser> {
   const user = await sessionUser();
-  if (!user) redirect(returnTo ? `/sign-in?next=${encodeURIComponent(returnTo)}` : '/sign-in');
-  return user;
+  if (user) return user;
+  const next = returnTo ?? (await headers()).get(PATH_HEADER);
+  redirect(next ? `/sign-in?next=${encodeURIComponent(next)}` : '/sign-in');
 }
