@@ -16,6 +16,9 @@ export default defineConfig({
     ],
   },
   test: {
+    // Generous, so that a slow or busy machine is not taken for a fault.
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
     projects: [
       {
         extends: true,
@@ -46,8 +49,6 @@ export default defineConfig({
           name: 'integration',
           environment: 'node',
           include: ['tests/integration/**/*.test.ts'],
-          testTimeout: 30_000,
-          hookTimeout: 60_000,
         },
       },
       {

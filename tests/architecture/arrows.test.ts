@@ -10,7 +10,7 @@ async function rulesBroken(file: string, text: string): Promise<(string | null)[
   return (result?.messages ?? []).map((message) => message.ruleId);
 }
 
-describe('lint', { timeout: 60_000 }, () => {
+describe('lint', { timeout: 300_000 }, () => {
   const arrow = 'twobow/arrows';
   it.each([
     [

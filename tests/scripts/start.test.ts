@@ -18,7 +18,7 @@ function run(command: string, args: string[], env: Record<string, string> = {}):
   });
 }
 
-describe('npm start', { timeout: 30_000 }, () => {
+describe('npm start', { timeout: 60_000 }, () => {
   it('says so where the port is taken, and how to choose another', async () => {
     const other = createServer();
     await new Promise<void>((resolve) => other.listen(0, '127.0.0.1', resolve));
