@@ -6,14 +6,16 @@ import { decide, decisionWith, type Decision } from '@/lib/passages/decide';
 import type { Passage } from '@/lib/passages/passage';
 import type { PreparedBoat } from '@/lib/passages/prepared-boat';
 import type { FollowedLeg, Sample, Shunt, StopReason, TrackPoint } from '@/lib/passages/sample';
-import type { End, Place, Sailing } from '@/lib/passages/sailing';
+import { shuntDisplacementM, type End, type Place, type Sailing } from '@/lib/passages/sailing';
 import { closestApproach, hasRoom, turnOutlook, type Corridor } from '@/lib/passages/turns';
 import { METRES_PER_NMI, M_S_PER_KNOT, MS_PER_HOUR, MS_PER_MINUTE } from '@/lib/units/constants';
 import type { EpochMs, Knots } from '@/lib/units/quantities';
 
 const LONGEST_STEP_MS = 5 * MS_PER_MINUTE;
-/** Passing a waypoint this close on a board is reaching it: nobody shunts twice for the last metres. */
+/** Passing a waypoint this close on a board is reaching it: nobody shunts for the last metres. */
 const REACHED_WITHIN_M = 25;
+/** Nor for less than a shunt would drift, as far as that is a small part of the corridor. */
+const REACHED_WITHIN_CORRIDOR_SHARE = 1 / 4;
 const ARRIVED_WITHIN_M = 0.5;
 /** docs/model.md §6: after six hours under 0.2 kn made good the rest is not known. */
 const SLOW_KN = 0.2;
@@ -90,6 +92,7 @@ class LegFollower {
       if (!soon.known) return soon.reason;
       const { sailing } = decision;
       if (sailing.mode === 'boards') {
+        if (this.remainingM() <= this.reachM(decision)) return null;
         this.inBoards = true;
         if (!hasRoom(this.corridor, sailing, decision.with)) return 'no-room';
         if (turnOutlook(this.place, this.corridor, sailing, decision.with).due) {
@@ -142,7 +145,7 @@ class LegFollower {
     const offset = mercatorOffsetM(this.place, this.corridor.target);
     const approach = closestApproach(offset, overGroundKn);
     const direct = sailing.mode === 'direct';
-    const reaches = direct || approach.missM <= REACHED_WITHIN_M;
+    const reaches = direct || approach.missM <= this.reachM(at);
     const arrivalMs = direct
       ? (this.remainingM() / (lengthOf(overGroundKn) * M_S_PER_KNOT)) * 1000
       : reaches && approach.inSeconds > 0
@@ -255,6 +258,11 @@ class LegFollower {
   private move(overGroundKn: Vector, ms: number): void {
     this.place = moved(this.place, overGroundKn, ms);
     this.time += ms;
+  }
+
+  private reachM(decision: Decision): number {
+    const driftM = lengthOf(shuntDisplacementM(decision.with));
+    return Math.max(REACHED_WITHIN_M, Math.min(driftM, this.corridor.halfWidthM * REACHED_WITHIN_CORRIDOR_SHARE));
   }
 
   private remainingM(): number {
