@@ -20,19 +20,19 @@ export interface MapPalette {
   readonly state: Readonly<Record<CheckState, string>>;
 }
 
-/** Sailcloth water, kraft-paper land, pencil. */
+/** Sailcloth water, land hatched in pencil on sawdust grey. */
 const DAY: MapPalette = {
-  beyondSheet: '#E7DFD0',
-  beyondRule: '#CDC1AC',
+  beyondSheet: '#EAE3D6',
+  beyondRule: '#D5CBB9',
   water: '#F2F3EE',
   shoreWash: '#E4E5DC',
   shoreRule: '#C9C8BB',
-  shore: '#5C5140',
-  land: '#E9DCC3',
-  hatch: '#C3AF8C',
+  shore: '#4A443A',
+  land: '#E4DCCD',
+  hatch: '#B3A793',
   paper: '#FCFAF4',
   ink: '#1E2A2F',
-  landText: '#4C3F2C',
+  landText: '#423A2E',
   waterText: '#526066',
   spruce: '#8A5A2B',
   state: { within: '#2C6E5B', thin: '#9A6700', beyond: '#A3243B', unknown: '#5B6470' },

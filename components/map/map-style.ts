@@ -56,7 +56,7 @@ function groundLayers(theme: MapTheme, palette: MapPalette): LayerSpecification[
       id: 'frame-rule',
       type: 'line',
       ...on('frame'),
-      layout: { 'line-join': 'miter' },
+      layout: { 'line-join': 'miter', 'line-cap': 'square' },
       paint: { 'line-color': palette.shore, 'line-width': 1, 'line-gap-width': 5 },
     },
     {

@@ -13,7 +13,6 @@ import {
 } from 'react-map-gl/maplibre';
 import type { Metres } from '@/lib/units/quantities';
 import { corridorFeatures } from './corridor-features';
-import { IMAGE_RATIO, drawImage } from './draw-image';
 import { InsertHandle } from './insert-handle';
 import { MapCredit } from './map-credit';
 import { MapLegend } from './map-legend';
@@ -23,6 +22,7 @@ import type { MapLeg, MapPlace, MapReefCall, MapWaypoint } from './map-types';
 import { markFeatures } from './mark-features';
 import { MarkLayers } from './mark-layers';
 import { LONG_STEP_M, STEP_M } from './nudge';
+import { supplyImages } from './supply-images';
 import { prepareMaplibre } from './prepare-maplibre';
 import { planFeatures, stateFeatures, trackFeatures } from './track-features';
 import { LEG_HIT_LAYERS, TrackLayers } from './track-layers';
@@ -50,6 +50,10 @@ export interface PassageMapProps {
   onSelectWaypoint?(id: string): void;
 }
 
+const MAP_WORDS = {
+  'Map.Title': 'Sample chart: arrow keys move it, plus and minus zoom',
+  'ScaleControl.NauticalMiles': 'nmi',
+};
 const NO_CORRIDORS: readonly Metres[] = [];
 
 /**
@@ -99,11 +103,7 @@ export function PassageMap({
 
   const attach = useCallback((created: MapRef | null) => {
     map.current = created;
-    const target = created?.getMap();
-    target?.setMissingStyleImageResolver((id) => {
-      const image = drawImage(id);
-      if (image && !target.hasImage(id)) target.addImage(id, image, { pixelRatio: IMAGE_RATIO });
-    });
+    if (created) supplyImages(created.getMap());
   }, []);
 
   const onIdle = ({ target }: MapEvent) => {
@@ -132,13 +132,13 @@ export function PassageMap({
         mapLib={prepareMaplibre()}
         mapStyle={style}
         initialViewState={view}
-        locale={{ 'Map.Title': 'Sample chart: arrow keys move it, plus and minus zoom' }}
+        locale={MAP_WORDS}
         attributionControl={false}
         dragRotate={false}
         pitchWithRotate={false}
         touchPitch={false}
         doubleClickZoom={readOnly}
-        minZoom={5}
+        minZoom={6}
         maxZoom={14}
         renderWorldCopies={false}
         interactiveLayerIds={ready ? LEG_HIT_LAYERS : []}
@@ -158,7 +158,7 @@ export function PassageMap({
               onInsert={(at) => onInsertWaypoint?.(leg, at)}
             />
           ))}
-        {waypoints.map((waypoint, i) => (
+        {shown.map((waypoint, i) => (
           <WaypointMarker
             key={waypoint.id}
             waypoint={waypoint}
@@ -174,6 +174,9 @@ export function PassageMap({
         <NavigationControl position="top-right" showCompass={false} />
         <ScaleControl position="bottom-left" unit="nautical" maxWidth={120} />
       </Map>
+      {!readOnly && waypoints.length === 0 && (
+        <p className="map-hint">Click or tap the water where the passage starts.</p>
+      )}
       <MapLegend palette={palette} />
       <MapCredit />
       <p id={helpId} hidden>

@@ -17,6 +17,7 @@ function names(
     type: 'symbol',
     source,
     'source-layer': 'places',
+    minzoom: 7,
     filter: ['all', ['==', ['get', 'kind'], kind], ['<=', ['get', 'rank'], RANK_SHOWN]],
     layout: {
       'text-field': ['get', 'name'],

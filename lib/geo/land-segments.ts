@@ -41,9 +41,10 @@ export function layOutLand(
   let i = 0;
   polygons.forEach((rings, polygon) => {
     for (const ring of rings) {
+      const placed = ring.map(toPlane);
       for (let k = 0; k + 1 < ring.length; k++) {
-        const a = toPlane(ring[k]!);
-        const b = toPlane(ring[k + 1]!);
+        const a = placed[k]!;
+        const b = placed[k + 1]!;
         laid.x1[i] = a.east;
         laid.y1[i] = a.north;
         laid.x2[i] = b.east;

@@ -59,7 +59,8 @@ export function chartLayers(polygons: readonly LandPolygon[], box: Box, places: 
     ),
     frame: collect([
       feature(
-        { type: 'LineString', coordinates: copy(corners) },
+        // Clockwise, so that words set on the line's left lie outside.
+        { type: 'LineString', coordinates: copy(corners.toReversed()) },
         { name: 'edge of the sample chart · nothing is known beyond' },
       ),
     ]),
