@@ -2,8 +2,7 @@ import { flagAt } from '@/lib/passages/flags/leg-context';
 import { forecastAgeH, OLD_FORECAST_H } from '@/lib/passages/flags/forecast-flags';
 import type { FollowedPassage } from '@/lib/passages/follow-passage';
 import type { CheckResult, Flag, Passage } from '@/lib/passages/passage';
-import { polarSpeedKn } from '@/lib/polars/boat-speed';
-import { holdsUpToKn } from '@/lib/rigging/holds-up-to';
+import { reefHolds } from '@/lib/passages/reef-holds';
 import type { Hours } from '@/lib/units/quantities';
 
 type Warning = CheckResult['warnings'][number];
@@ -57,13 +56,12 @@ function boatWarnings({ boat, stream }: Passage, hasCurve: boolean): Warning[] {
 
 function carryWarnings({ boat }: Passage): Warning[] {
   return boat.reefs.flatMap((reef, reefIndex) => {
-    if (reef.carryUpToMeanKn === undefined) return [];
-    const speedKnAt = (windKn: number, angleDeg: number) =>
-      polarSpeedKn(boat.polar, windKn, angleDeg) * reef.speedFactor;
-    const { worstKn } = holdsUpToKn(boat, reef, speedKnAt, boat.polar.windAnglesDeg);
-    if (reef.carryUpToMeanKn <= worstKn) return [];
-    const numbers = { reefIndex, carryUpToKn: reef.carryUpToMeanKn, holdsUpToKn: worstKn };
-    const message = `“${reef.name}” is carried up to ${reef.carryUpToMeanKn} kn, but holds up to ${worstKn.toFixed(1)} kn at its worst wind angle. The computed wind is kept.`;
+    const carried = [reef.carryUpToMeanKn, reef.carryUpToGustKn && reef.carryUpToGustKn / boat.gustFactor];
+    const carryUpToKn = Math.max(...carried.map((kn) => kn ?? 0));
+    const holdsUpToKn = carryUpToKn > 0 ? reefHolds(boat, reef).worstKn : 0;
+    if (carryUpToKn <= holdsUpToKn) return [];
+    const numbers = { reefIndex, carryUpToKn, holdsUpToKn };
+    const message = `“${reef.name}” is carried up to a mean of ${carryUpToKn.toFixed(1)} kn, but holds up to ${holdsUpToKn.toFixed(1)} kn at its worst wind angle. The check calls the next reef from there.`;
     return [warn(flagAt('carry-above-holds', 'caution', null, numbers), message)];
   });
 }
