@@ -119,3 +119,20 @@ export function StripDark({ model, layout }: LaneProps) {
     </g>
   ));
 }
+
+/** The rest of a passage whose arrival is not known. */
+export function StripUnknown({ model, layout }: LaneProps) {
+  if (model.unknownFromMs === null) return null;
+  const left = layout.x(model.unknownFromMs);
+  const right = layout.width - LANES.right;
+  const middle = (left + right) / 2;
+  return (
+    <g>
+      <rect x={left} y={2} width={right - left} height={layout.axisTop - 2} fill="url(#strip-hatch)" />
+      <rect x={middle - 36} y={LANES.wind.top + 36} width={72} height={24} className="fill-ground" />
+      <text x={middle} y={LANES.wind.top + 52} textAnchor="middle" className="fill-unknown text-[12px] font-bold">
+        not known
+      </text>
+    </g>
+  );
+}

@@ -33,6 +33,8 @@ export interface Span {
 
 /** Everything the strip draws, laid along time. */
 export interface StripModel extends Span {
+  /** From here on nothing is known, to the end of the strip; null where she arrives. */
+  readonly unknownFromMs: EpochMs | null;
   readonly legs: readonly StripLeg[];
   /** Pieces between the gaps where the wind is not known. */
   readonly wind: readonly (readonly StripWind[])[];
@@ -49,11 +51,16 @@ export interface StripModel extends Span {
 /** Samples over the whole strip; enough that a squall of a typed table is not stepped over on screen. */
 const MOST_SAMPLES = 240;
 
+/** Where she is not known to arrive, this share of the strip stays for saying so. */
+const UNKNOWN_SHARE = 0.12;
+
 export function stripModel(result: CheckResult, plan: PassagePlan, gustFactor: number): StripModel {
   const startMs = Date.parse(plan.departure);
   const legs = result.legs.flatMap((leg, index) => toStripLeg(leg, index));
   const lastKnown = Math.max(startMs, ...legs.map((leg) => leg.endMs));
-  const endMs = Math.max(lastKnown, startMs + 15 * MS_PER_MINUTE);
+  const knownEndMs = Math.max(lastKnown, startMs + 15 * MS_PER_MINUTE);
+  const unknownFromMs = result.totals.arrival === null ? lastKnown : null;
+  const endMs = unknownFromMs === null ? knownEndMs : knownEndMs + (knownEndMs - startMs) * UNKNOWN_SHARE;
   const times = sampleTimes(startMs, endMs);
   const series = { rows: plan.wind.rows.map((row) => ({ ...row, time: Date.parse(row.time) })) };
   const winds = times.map((ms) => ({ ms, at: windAt(series as Parameters<typeof windAt>[0], ms, gustFactor) }));
@@ -62,6 +69,7 @@ export function stripModel(result: CheckResult, plan: PassagePlan, gustFactor: n
   return {
     startMs,
     endMs,
+    unknownFromMs,
     legs,
     wind,
     windGaps: gaps(winds.map(({ ms, at }) => ({ ms, isIn: !at.known }))),

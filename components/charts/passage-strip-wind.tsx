@@ -28,20 +28,22 @@ export function StripWindBand({ model, layout }: { readonly model: StripModel; r
           </g>
         );
       })}
-      {model.windGaps.map((gap) => (
-        <g key={gap.startMs}>
-          <rect
-            x={x(gap.startMs)}
-            y={LANES.wind.top}
-            width={Math.max(2, x(gap.endMs) - x(gap.startMs))}
-            height={LANES.wind.height}
-            fill="url(#strip-hatch)"
-          />
-          <text x={x(gap.startMs) + 6} y={LANES.wind.top + 16} className="fill-unknown text-[11px]">
-            wind not known
-          </text>
-        </g>
-      ))}
+      {model.windGaps
+        .filter((gap) => model.unknownFromMs === null || gap.startMs < model.unknownFromMs - 1)
+        .map((gap) => (
+          <g key={gap.startMs}>
+            <rect
+              x={x(gap.startMs)}
+              y={LANES.wind.top}
+              width={Math.max(2, x(gap.endMs) - x(gap.startMs))}
+              height={LANES.wind.height}
+              fill="url(#strip-hatch)"
+            />
+            <text x={x(gap.startMs) + 6} y={LANES.wind.top + 16} className="fill-unknown text-[11px]">
+              wind not known
+            </text>
+          </g>
+        ))}
     </g>
   );
 }

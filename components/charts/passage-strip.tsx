@@ -6,7 +6,7 @@ import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { formatInZone } from '@/lib/time/format-in-zone';
 import { zoneOffsetMinutes } from '@/lib/time/zone-offset';
 import { LANES, stripLayout, timeTicks } from './passage-strip-layout';
-import { StripDark, StripEnds, StripReefs, StripStream } from './passage-strip-lanes';
+import { StripDark, StripEnds, StripReefs, StripStream, StripUnknown } from './passage-strip-lanes';
 import { StripLegs } from './passage-strip-legs';
 import { stripModel } from './passage-strip-model';
 import { readoutAt } from './passage-strip-readout';
@@ -79,6 +79,7 @@ export function PassageStrip({ result, plan, gustFactor, selectedLeg, onSelectLe
           <StripEnds model={model} layout={layout} />
           <StripStream model={model} layout={layout} />
           <StripDark model={model} layout={layout} />
+          <StripUnknown model={model} layout={layout} />
           <line
             x1={LANES.left}
             x2={layout.width - LANES.right}

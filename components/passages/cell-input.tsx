@@ -12,6 +12,8 @@ interface CellInputProps extends Omit<InputHTMLAttributes<HTMLInputElement>, 'va
   readonly hint?: string;
   /** In a table the heading is the visible label. */
   readonly hideLabel?: boolean;
+  /** A short visible label for a phone, where the table has no room for headings. */
+  readonly phoneLabel?: string;
 }
 
 /** A text field that keeps whatever is typed, its unit beside it and its message under it. */
@@ -23,6 +25,7 @@ export function CellInput({
   unit,
   hint,
   hideLabel,
+  phoneLabel,
   className,
   ...rest
 }: CellInputProps) {
@@ -34,6 +37,11 @@ export function CellInput({
         {label}
         {unit && hideLabel ? `, ${unit}` : ''}
       </label>
+      {phoneLabel && (
+        <span aria-hidden="true" className="text-muted block text-xs md:hidden">
+          {phoneLabel}
+        </span>
+      )}
       <span className="flex items-center gap-1.5">
         <input
           id={id}

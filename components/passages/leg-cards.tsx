@@ -39,7 +39,7 @@ export function LegCards({ facts, workingMargin, selectedLeg, onSelectLeg }: Leg
             </dd>
             <dt>Leading end</dt>
             <dd>
-              {row.end}; {row.shunts === '1' ? '1 shunt' : `${row.shunts} shunts`}
+              {row.end}; {row.shunts}
             </dd>
             <dt>Reef called</dt>
             <dd>

@@ -6,7 +6,7 @@ import { formatInZone } from '@/lib/time/format-in-zone';
 import type { EpochMs } from '@/lib/units/quantities';
 import type { WindSeries } from '@/lib/weather/series';
 import { windAt } from '@/lib/weather/wind-at';
-import { degreesOf, hoursText, kilogramMetres, loadShareText, newtonMetres, nmi } from './show';
+import { countText, degreesOf, hoursText, kilogramMetres, loadShareText, newtonMetres, nmi } from './show';
 
 /** One leg's row of the result, in words and numbers with their units. */
 export interface LegFacts {
@@ -47,7 +47,7 @@ export function legFacts(result: CheckResult, plan: PassagePlan, gustFactor: num
       way: leg.mode === 'boards' ? `in boards, ${nmi(leg.sailedNmi ?? 0)} sailed` : (leg.mode ?? NOT_KNOWN),
       end:
         leg.leadingEnd === null ? NOT_KNOWN : leg.leadingEnd === 'both' ? 'A and B in turn' : `${leg.leadingEnd} leads`,
-      shunts: leg.start === null ? NOT_KNOWN : String(leg.shunts),
+      shunts: leg.start === null ? 'shunts not known' : countText(leg.shunts, 'shunt', 'shunts'),
       reefs: leg.reefCalls.map((call) => `${call.reef}, by ${formatInZone(Date.parse(call.by), plan.zone, 'time')}`),
       loadShare: leg.largestLoadShare === null ? NOT_KNOWN : loadShareText(leg.largestLoadShare),
       atRest: leg.largestLoadShareAtRest === null ? null : loadShareText(leg.largestLoadShareAtRest),
@@ -69,6 +69,9 @@ function windWords(leg: LegResult, series: WindSeries, gustFactor: number): stri
   const last = leg.end === null ? null : windOff(leg, series, Date.parse(leg.end), gustFactor);
   if (first === null) return NOT_KNOWN;
   if (last === null || last === first) return first;
+  const [fromAngle, fromSide] = first.split('° ');
+  const [toAngle, toSide] = last.split('° ');
+  if (fromSide && fromSide === toSide) return `${fromAngle}°, then ${toAngle}° ${toSide}`;
   return `${first}, then ${last}`;
 }
 

@@ -19,7 +19,7 @@ export function LegRow({ index, onInsert }: LegRowProps) {
   const measures = legMeasures(draft, index - 1);
   return (
     <tr className="text-sm" data-testid="leg-row">
-      <td className="text-spruce w-8 pr-2 text-right" aria-hidden="true"></td>
+      <td aria-hidden="true" />
       <td className="pb-2">
         <div className="border-spruce/50 flex flex-wrap items-center gap-x-4 gap-y-1 border-l-2 border-dashed pl-3">
           <span className="font-bold">Leg {index}</span>

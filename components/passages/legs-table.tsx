@@ -57,7 +57,7 @@ export function LegsTable({ facts, workingMargin, selectedLeg, onSelectLeg }: Le
             <td className="py-2.5 pr-3">
               {row.end}
               <br />
-              {row.shunts === '1' ? '1 shunt' : `${row.shunts} shunts`}
+              {row.shunts}
             </td>
             <td className="py-2.5 pr-3">
               <ReefLines reefs={row.reefs} />
@@ -66,9 +66,15 @@ export function LegsTable({ facts, workingMargin, selectedLeg, onSelectLeg }: Le
               <LoadShare row={row} workingMargin={workingMargin} />
             </td>
             <td className="py-2.5 pr-3">
-              {row.heeling} against
-              <br />
-              {row.righting}
+              {row.leg.heelingMomentNewtonM !== null ? (
+                <>
+                  {row.heeling} against
+                  <br />
+                  {row.righting}
+                </>
+              ) : (
+                'not known'
+              )}
             </td>
             <td className="py-2.5 pr-3 whitespace-nowrap">
               {row.times}

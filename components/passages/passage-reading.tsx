@@ -11,7 +11,8 @@ import { resultAsOfNow } from './as-of-now';
 import { CheckOrigin } from './check-origin';
 import { NotebookSection } from './notebook-section';
 import { PlannerMap } from './planner-map';
-import { ResultView } from './result-view';
+import { PageLinks } from './page-links';
+import { RESULT_LINKS, ResultView } from './result-view';
 import { Verdict } from './verdict';
 
 export interface ReadCheck {
@@ -69,6 +70,7 @@ function StoredCheck({ passage, check, boat, nowMs }: StoredCheckProps) {
       <div>
         <Verdict result={now.result} plan={passage} reefNames={check.sheet.reefs.map((reef) => reef.name)} />
         <CheckOrigin check={check} boat={boat} passage={passage} now={now} nowMs={nowMs} />
+        <PageLinks links={RESULT_LINKS} />
       </div>
       <PlannerMap
         waypoints={waypoints}
@@ -78,7 +80,7 @@ function StoredCheck({ passage, check, boat, nowMs }: StoredCheckProps) {
         readOnly
         {...select}
       />
-      <NotebookSection title="Passage strip">
+      <NotebookSection title="Passage strip" anchor="strip">
         <PassageStrip {...shown} {...select} onFocus={setFocusPoint} />
       </NotebookSection>
       <ResultView result={now.result} plan={passage} sheet={check.sheet} {...select} />

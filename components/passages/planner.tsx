@@ -7,19 +7,27 @@ import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { draftFromPlan } from './draft-from-plan';
 import { placeOfWaypoint } from './leg-measures';
 import { NotebookSection } from './notebook-section';
+import { PageLinks } from './page-links';
 import { PlanFields } from './plan-fields';
 import { PlannerFormProvider } from './planner-context';
 import { readNumber } from './read-number';
 import { PlannerMap } from './planner-map';
 import { PlannerVerdict } from './planner-verdict';
-import { ResultView } from './result-view';
+import { RESULT_LINKS, ResultView } from './result-view';
 import { SaveBar } from './save-bar';
 import { usePlanner } from './use-planner';
+import { WaypointTable } from './waypoint-table';
 
 export interface PlannerProps {
   readonly passage: PassagePlan & { readonly id: string; readonly revision: number };
   readonly boat: { readonly name: string; readonly sheetNumber: number; readonly sheet: BoatSheet };
 }
+
+const INPUT_LINKS = [
+  ['track', 'Track'],
+  ['departure', 'Departure'],
+  ['wind', 'Wind'],
+] as const;
 
 /** The planner: map and strip, the plan in fields, and the check of what is typed just now. */
 export function Planner({ passage, boat }: PlannerProps) {
@@ -51,8 +59,9 @@ export function Planner({ passage, boat }: PlannerProps) {
         {boat.name}, boat sheet {boat.sheetNumber}. The check follows every change; saving stores it.
       </p>
       <PlannerVerdict planner={planner} reefNames={sheet.reefs.map((reef) => reef.name)} />
+      <PageLinks links={current ? [...INPUT_LINKS, ...RESULT_LINKS] : INPUT_LINKS} />
       <div className="mt-6 grid gap-8 lg:grid-cols-[minmax(0,11fr)_minmax(0,9fr)]">
-        <div className="min-w-0 space-y-6">
+        <div className="min-w-0 self-start lg:sticky lg:top-20">
           <PlannerMap
             waypoints={waypoints}
             corridors={waypoints.slice(1).map((waypoint) => waypoint.corridorM)}
@@ -70,21 +79,23 @@ export function Planner({ passage, boat }: PlannerProps) {
             }}
             onSelectLeg={setSelectedLeg}
           />
-          <NotebookSection title="Passage strip">
-            {current ? (
-              <PassageStrip
-                {...current}
-                selectedLeg={selectedLeg}
-                onSelectLeg={setSelectedLeg}
-                onFocus={setFocusPoint}
-              />
-            ) : (
-              <p className="text-muted text-sm">
-                The legs are laid along time here as soon as track, departure and wind can be checked.
-              </p>
-            )}
-          </NotebookSection>
         </div>
+        <NotebookSection title="Track" anchor="track">
+          <WaypointTable />
+        </NotebookSection>
+      </div>
+      <div className="mt-8">
+        <NotebookSection title="Passage strip" anchor="strip">
+          {current ? (
+            <PassageStrip {...current} selectedLeg={selectedLeg} onSelectLeg={setSelectedLeg} onFocus={setFocusPoint} />
+          ) : (
+            <p className="text-muted text-sm">
+              The legs are laid along time here as soon as track, departure and wind can be checked.
+            </p>
+          )}
+        </NotebookSection>
+      </div>
+      <div className="mt-8">
         <PlanFields />
       </div>
       {current && (

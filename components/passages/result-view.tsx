@@ -21,6 +21,13 @@ export interface ResultViewProps {
   onSelectLeg: (index: number) => void;
 }
 
+export const RESULT_LINKS = [
+  ['strip', 'Passage strip'],
+  ['legs', 'Legs'],
+  ['reef-calls', 'Reef calls'],
+  ['why', 'Why'],
+] as const;
+
 /** The result under the verdict: totals, legs, reef calls, reasons, working. */
 export function ResultView({ result, plan, sheet, selectedLeg, onSelectLeg }: ResultViewProps) {
   const facts = useMemo(() => legFacts(result, plan, sheet.gustFactor), [result, plan, sheet.gustFactor]);
@@ -29,15 +36,15 @@ export function ResultView({ result, plan, sheet, selectedLeg, onSelectLeg }: Re
   return (
     <div className="space-y-8">
       <Totals result={result} departure={plan.departure} zone={plan.zone} />
-      <NotebookSection title="Legs">
+      <NotebookSection title="Legs" anchor="legs">
         <LegsTable {...shared} />
         <LegCards {...shared} />
       </NotebookSection>
       <div className="grid gap-8 lg:grid-cols-2">
-        <NotebookSection title="Reef calls">
+        <NotebookSection title="Reef calls" anchor="reef-calls">
           <ReefCallList legs={result.legs} plan={plan} reefNames={reefNames} />
         </NotebookSection>
-        <NotebookSection title="Why, and what may be done">
+        <NotebookSection title="Why, and what may be done" anchor="why">
           <Reasons result={result} plan={plan} reefNames={reefNames} />
           <div className="mt-4">
             <Working result={result} sheet={sheet} />

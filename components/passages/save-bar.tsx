@@ -29,7 +29,7 @@ export function SaveBar({ planner, passageId }: { readonly planner: Planner; rea
         <ButtonLink href={`/passages/${passageId}`} variant="plain">
           Read
         </ButtonLink>
-        <Button onClick={save} disabled={saving.busy || !unsaved}>
+        <Button onClick={save} disabled={saving.busy}>
           Save
         </Button>
       </div>

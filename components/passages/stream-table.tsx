@@ -47,7 +47,7 @@ export function StreamTable() {
                     label={`Stream row ${i + 1}, sets toward, degrees true`}
                     hideLabel
                     inputMode="decimal"
-                    placeholder="toward °T"
+                    phoneLabel="toward °T"
                     value={row.toward}
                     onValue={(value) => dispatch({ type: 'setStreamRow', id: row.id, field: 'toward', value })}
                     problem={problemAt(`/streamRows/${i}/towardDeg`)}
@@ -59,7 +59,7 @@ export function StreamTable() {
                     label={`Stream row ${i + 1}, drift, knots`}
                     hideLabel
                     inputMode="decimal"
-                    placeholder="kn"
+                    phoneLabel="drift, kn"
                     value={row.kn}
                     onValue={(value) => dispatch({ type: 'setStreamRow', id: row.id, field: 'kn', value })}
                     problem={problemAt(`/streamRows/${i}/kn`)}

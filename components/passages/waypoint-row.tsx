@@ -28,9 +28,9 @@ export function WaypointRow({ index, onSay }: WaypointRowProps) {
         {index + 1}
       </th>
       <td className="py-2">
-        <div className="grid grid-cols-2 gap-2 md:grid-cols-[minmax(0,3fr)_minmax(0,2.4fr)_minmax(0,2.4fr)_auto]">
+        <div className="grid grid-cols-[minmax(0,1fr)_minmax(0,1fr)] gap-2 md:grid-cols-[minmax(0,3fr)_minmax(0,2.4fr)_minmax(0,2.4fr)_auto]">
           <CellInput
-            className="col-span-2 md:col-span-1"
+            className="max-md:order-1"
             label={`Name of waypoint ${index + 1}`}
             hideLabel
             value={waypoint.name}
@@ -39,6 +39,7 @@ export function WaypointRow({ index, onSay }: WaypointRowProps) {
             maxLength={120}
           />
           <CellInput
+            className="max-md:order-3"
             label={`Latitude of waypoint ${index + 1}, degrees`}
             hideLabel
             value={waypoint.lat}
@@ -48,6 +49,7 @@ export function WaypointRow({ index, onSay }: WaypointRowProps) {
             maxLength={40}
           />
           <CellInput
+            className="max-md:order-4"
             label={`Longitude of waypoint ${index + 1}, degrees`}
             hideLabel
             value={waypoint.lon}
@@ -56,7 +58,7 @@ export function WaypointRow({ index, onSay }: WaypointRowProps) {
             placeholder="123°01.9′W"
             maxLength={40}
           />
-          <span className="col-span-2 flex justify-end md:col-span-1">
+          <span className="flex items-start justify-end max-md:order-2">
             <SmallButton label={`Move ${called} up`} disabled={index === 0} onClick={() => shift(-1)}>
               ↑
             </SmallButton>

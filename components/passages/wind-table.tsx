@@ -90,8 +90,11 @@ function WindRow({ index }: { readonly index: number }) {
   const cell = 'py-1.5 pr-2 max-md:min-w-0';
   const shared = { hideLabel: true, inputMode: 'decimal', maxLength: 20 } as const;
   return (
-    <tr className="border-line border-t align-top max-md:grid max-md:grid-cols-3 max-md:py-1" data-testid="wind-row">
-      <td className={`${cell} max-md:col-span-3 md:w-[38%]`}>
+    <tr
+      className="border-line border-t align-top max-md:grid max-md:grid-cols-[1fr_1fr_1fr_auto] max-md:py-1"
+      data-testid="wind-row"
+    >
+      <td className={`${cell} max-md:order-1 max-md:col-span-3 md:w-[38%]`}>
         <TimeField
           label={`Wind row ${number}`}
           hideLabel
@@ -101,40 +104,40 @@ function WindRow({ index }: { readonly index: number }) {
           problem={problemAt(`${at}/time`)}
         />
       </td>
-      <td className={cell}>
+      <td className={`${cell} max-md:order-3`}>
         <CellInput
           {...shared}
           label={`Wind row ${number}, from, degrees true`}
           value={row.from}
           onValue={set('from')}
           problem={problemAt(`${at}/fromDeg`)}
-          placeholder="from °T"
+          phoneLabel="from °T"
         />
       </td>
-      <td className={cell}>
+      <td className={`${cell} max-md:order-3`}>
         <CellInput
           {...shared}
           label={`Wind row ${number}, mean, knots`}
           value={row.mean}
           onValue={set('mean')}
           problem={problemAt(`${at}/meanKn`)}
-          placeholder="mean kn"
+          phoneLabel="mean, kn"
         />
       </td>
-      <td className={cell}>
+      <td className={`${cell} max-md:order-3`}>
         <CellInput
           {...shared}
           label={`Wind row ${number}, gust, knots`}
           value={row.gust}
           onValue={set('gust')}
           problem={problemAt(`${at}/gustKn`)}
-          placeholder="gust kn"
+          phoneLabel="gust, kn"
         />
       </td>
-      <td className="py-1.5 pt-4 pr-2 whitespace-nowrap tabular-nums max-md:col-span-2 max-md:py-1.5">
+      <td className="py-1.5 pt-4 pr-2 whitespace-nowrap tabular-nums max-md:order-4 max-md:self-end max-md:py-3.5">
         {Number.isNaN(mean) || mean < 0 ? '–' : `force ${beaufortForce(mean)}`}
       </td>
-      <td className="py-1.5 text-right">
+      <td className="py-1.5 text-right max-md:order-2">
         <SmallButton
           label={`Take out wind row ${number}`}
           onClick={() => dispatch({ type: 'deleteWindRow', id: row.id })}

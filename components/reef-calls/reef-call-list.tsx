@@ -19,6 +19,7 @@ export function ReefCallList({ legs, plan, reefNames }: ReefCallListProps) {
       {calls.map((call, i) => {
         const before = calls[i - 1];
         const deeper = !before || reefNames.indexOf(call.reef) > reefNames.indexOf(before.reef);
+        const clock = (iso: string) => formatInZone(Date.parse(iso), plan.zone, 'time');
         const zoned = (iso: string) => formatInZone(Date.parse(iso), plan.zone, 'time-zone');
         return (
           <li key={`${call.at}-${call.reef}`} className="grid gap-x-4 gap-y-0.5 py-2 sm:grid-cols-[11rem_1fr]">
@@ -26,9 +27,9 @@ export function ReefCallList({ legs, plan, reefNames }: ReefCallListProps) {
               {i === 0 ? `Start with ${call.reef}` : deeper ? `Reef: ${call.reef}` : `Shake out to ${call.reef}`}
             </span>
             <span>
-              {call.at === call.by
-                ? `at ${zoned(call.at)}`
-                : `call at ${formatInZone(Date.parse(call.at), plan.zone, 'time')}, in by ${zoned(call.by)}`}
+              {clock(call.at) === clock(call.by)
+                ? `${i === 0 ? 'from' : 'call at'} ${zoned(call.at)}`
+                : `call at ${clock(call.at)}, in by ${zoned(call.by)}`}
               , leg {call.legIndex + 1}, {placeOf(call.legIndex, call, plan)}; for mean {Math.round(call.meanKn)} kn,
               gust {Math.round(call.gustKn)} kn
             </span>

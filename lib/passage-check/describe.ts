@@ -1,6 +1,6 @@
 import { FLAG_WORDS } from '@/lib/passage-check/flag-words';
 import { placeWords } from '@/lib/passage-check/place-words';
-import type { Flag, LegResult, Waypoint } from '@/lib/passages/passage';
+import type { CheckState, Flag, FlagCode, LegResult, Waypoint } from '@/lib/passages/passage';
 import { formatInZone } from '@/lib/time/format-in-zone';
 
 /** What it takes to speak of a flag as one would aboard. */
@@ -48,9 +48,26 @@ export function describeLeg(leg: Pick<LegResult, 'flags'>, scene: LegScene): rea
     .map((flag) => ({ flag, ...describeFlag(flag, scene) }));
 }
 
+/** The flags that make a state; any other flag, however grave, is not why a leg has it. */
+const MADE_BY: Readonly<Record<CheckState, readonly FlagCode[]>> = {
+  within: [],
+  thin: ['little-margin', 'carry-up-to-exceeded'],
+  beyond: ['beyond-righting-moment'],
+  unknown: [
+    'forecast-over',
+    'wind-not-known',
+    'stream-not-known',
+    'no-room',
+    'never-reached',
+    'too-long-to-follow',
+    'forecast-old',
+  ],
+};
+
 /** Why a leg has its state, in one sentence. */
 export function describeLegState(leg: LegResult, scene: LegScene): string {
-  const first = describeLeg(leg, scene)[0];
+  const found = describeLeg(leg, scene);
+  const first = found.find(({ flag }) => MADE_BY[leg.state].includes(flag.code)) ?? found[0];
   if (leg.state === 'within' || !first) {
     const share = leg.largestLoadShare;
     const said = share === null ? 'its load share is not known' : `load share at most ${share.toFixed(2)}`;

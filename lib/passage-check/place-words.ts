@@ -13,6 +13,9 @@ const OFF_WITHIN_NMI = 0.3;
 export function placeWords(place: Position, from: NamedPlace, to: NamedPlace): string {
   const toGoNmi = rhumbInverse(place, to).distanceM / METRES_PER_NMI;
   const goneNmi = rhumbInverse(from, place).distanceM / METRES_PER_NMI;
-  if (Math.min(toGoNmi, goneNmi) <= OFF_WITHIN_NMI) return `off ${toGoNmi <= goneNmi ? to.name : from.name}`;
+  if (Math.min(toGoNmi, goneNmi) <= OFF_WITHIN_NMI) {
+    const { name } = toGoNmi <= goneNmi ? to : from;
+    return /^off\s/i.test(name) ? name : `off ${name}`;
+  }
   return `${toGoNmi.toFixed(1)} nmi before ${to.name}`;
 }
