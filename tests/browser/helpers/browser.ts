@@ -1,6 +1,6 @@
 import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
 
-/** Where `npm test` serves the app for these tests. (Vitest sets a TWOBOW_TEST_URL of its own, hence the long name.) */
+/** Where `npm test` serves the app for these tests. (Vitest sets a BASE_URL of its own, hence the long name.) */
 export const baseUrl: string = process.env.TWOBOW_TEST_ADDRESS ?? '';
 if (!baseUrl) throw new Error('TWOBOW_TEST_ADDRESS is not set. Run these tests by “npm test -- browser”.');
 
