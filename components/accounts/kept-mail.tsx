@@ -13,7 +13,7 @@ export function KeptMail({ mail }: KeptMailProps) {
       <p className="break-words whitespace-pre-wrap">
         {mail.text.split(/(https?:\/\/\S+)/).map((part, index) =>
           index % 2 === 1 ? (
-            <a key={index} href={part}>
+            <a key={index} href={part} className="underline">
               {part}
             </a>
           ) : (

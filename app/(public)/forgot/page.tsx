@@ -11,7 +11,9 @@ export default function ForgotPage() {
       <PageTitle title="Set a new password" aside="A link to do it with is sent to your address." />
       <ForgotForm action={requestReset} />
       <p className="mt-6">
-        <Link href="/sign-in">Back to sign-in</Link>
+        <Link href="/sign-in" className="underline">
+          Back to sign-in
+        </Link>
       </p>
     </>
   );

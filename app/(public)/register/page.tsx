@@ -11,7 +11,9 @@ export default function RegisterPage() {
       <PageTitle title="Register" />
       <RegisterForm action={register} />
       <p className="mt-6">
-        <Link href="/sign-in">You have an account: sign in</Link>
+        <Link href="/sign-in" className="underline">
+          You have an account: sign in
+        </Link>
       </p>
     </>
   );

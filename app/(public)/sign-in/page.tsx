@@ -31,7 +31,13 @@ export default async function SignInPage({ searchParams }: Props) {
         {typeof error === 'string' && <Notice tone="danger">{signInProblem(error)}</Notice>}
         <SignInForm next={goOn} />
         <p>
-          <Link href="/forgot">Set a new password</Link> · <Link href="/register">Register</Link>
+          <Link href="/forgot" className="underline">
+            Set a new password
+          </Link>{' '}
+          ·{' '}
+          <Link href="/register" className="underline">
+            Register
+          </Link>
         </p>
       </div>
     </>

@@ -12,7 +12,9 @@ export default async function ResetPage({ params }: { readonly params: Promise<{
       <PageTitle title="New password" aside="It ends every session of the account." />
       <ResetForm action={setNewPassword} token={token} />
       <p className="mt-6">
-        <Link href="/forgot">Ask for a new link</Link>
+        <Link href="/forgot" className="underline">
+          Ask for a new link
+        </Link>
       </p>
     </>
   );
