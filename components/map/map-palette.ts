@@ -51,7 +51,7 @@ const NIGHT: MapPalette = {
   paper: '#0A0706',
   ink: '#D9895B',
   landText: '#B5714D',
-  waterText: '#A2654A',
+  waterText: '#AC6C4F',
   spruce: '#E0A04E',
   state: { within: '#C08A4A', thin: '#E0A04E', beyond: '#F0583A', unknown: '#A97A66' },
 };

@@ -98,7 +98,10 @@ export function PassageMap({
   const handles = useHandlePlaces(waypoints, zoom);
 
   useEffect(() => {
-    if (focusPoint) map.current?.easeTo({ center: [focusPoint.lon, focusPoint.lat], duration: 400 });
+    if (!focusPoint || !map.current) return;
+    const place: [number, number] = [focusPoint.lon, focusPoint.lat];
+    // What is in sight stays where it is: a map that moves under every look cannot be read.
+    if (!map.current.getBounds().contains(place)) map.current.easeTo({ center: place, duration: 400 });
   }, [focusPoint]);
 
   const attach = useCallback((created: MapRef | null) => {
