@@ -4,13 +4,10 @@ import { useId, useMemo, useState, type PointerEvent } from 'react';
 import type { CheckResult } from '@/lib/passages/passage';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { formatInZone } from '@/lib/time/format-in-zone';
-import { zoneOffsetMinutes } from '@/lib/time/zone-offset';
-import { LANES, stripLayout, timeTicks } from './passage-strip-layout';
-import { StripDark, StripEnds, StripReefs, StripStream, StripUnknown } from './passage-strip-lanes';
-import { StripLegs } from './passage-strip-legs';
+import { StripDrawing } from './passage-strip-drawing';
+import { stripLayout } from './passage-strip-layout';
 import { stripModel } from './passage-strip-model';
 import { readoutAt } from './passage-strip-readout';
-import { StripWindBand } from './passage-strip-wind';
 import { placeAt } from './place-at';
 import { useRoomPx } from './use-room-px';
 
@@ -31,7 +28,7 @@ export function PassageStrip({ result, plan, gustFactor, selectedLeg, onSelectLe
   const sliderId = useId();
   const [lookMs, setLookMs] = useState<number | null>(null);
   const model = useMemo(() => stripModel(result, plan, gustFactor), [result, plan, gustFactor]);
-  const layout = stripLayout(model, roomPx);
+  const layout = useMemo(() => stripLayout(model, roomPx), [model, roomPx]);
   const { zone } = plan;
   const clock = (ms: number) => formatInZone(ms, zone, 'time');
 
@@ -67,47 +64,14 @@ export function PassageStrip({ result, plan, gustFactor, selectedLeg, onSelectLe
           onPointerLeave={(event) => event.pointerType === 'mouse' && look(null)}
         >
           <title id={titleId}>{describeStrip(model, clock, zone)}</title>
-          <defs>
-            <pattern id="strip-hatch" width="8" height="8" patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
-              <line x1="0" y1="0" x2="0" y2="8" className="stroke-unknown" strokeWidth="1.5" strokeOpacity="0.5" />
-            </pattern>
-          </defs>
-          <LaneNames hasStream={model.stream !== null} />
-          <StripWindBand model={model} layout={layout} />
-          <StripLegs model={model} layout={layout} selectedLeg={selectedLeg} onSelectLeg={onSelectLeg} />
-          <StripReefs model={model} layout={layout} clock={clock} />
-          <StripEnds model={model} layout={layout} />
-          <StripStream model={model} layout={layout} />
-          <StripDark model={model} layout={layout} />
-          <StripUnknown model={model} layout={layout} />
-          <line
-            x1={LANES.left}
-            x2={layout.width - LANES.right}
-            y1={layout.axisTop}
-            y2={layout.axisTop}
-            className="stroke-ink"
-          />
-          {timeTicks(model, layout, zoneOffsetMinutes(model.startMs, zone) * 60_000).map((ms) => (
-            <g key={ms}>
-              <line
-                x1={layout.x(ms)}
-                x2={layout.x(ms)}
-                y1={layout.axisTop}
-                y2={layout.axisTop + 5}
-                className="stroke-ink"
-              />
-              <text x={layout.x(ms)} y={layout.axisTop + 19} textAnchor="middle" className="fill-ink text-[11px]">
-                {clock(ms)}
-              </text>
-            </g>
-          ))}
+          <StripDrawing model={model} layout={layout} zone={zone} selectedLeg={selectedLeg} onSelectLeg={onSelectLeg} />
           {lookedAt !== null && (
             <line
               x1={layout.x(lookedAt)}
               x2={layout.x(lookedAt)}
               y1={2}
               y2={layout.axisTop}
-              className="stroke-beyond"
+              className="stroke-ink"
               strokeWidth={1.5}
             />
           )}
@@ -139,20 +103,6 @@ export function PassageStrip({ result, plan, gustFactor, selectedLeg, onSelectLe
       </figcaption>
     </figure>
   );
-}
-
-function LaneNames({ hasStream }: { readonly hasStream: boolean }) {
-  const names: readonly (readonly [string, number])[] = [
-    ['legs', LANES.legs.top + 26],
-    ['reefs', LANES.reefs.top + 15],
-    ['end', LANES.ends.top + 16],
-    ...(hasStream ? [['stream', LANES.stream.top + 18] as const] : []),
-  ];
-  return names.map(([name, y]) => (
-    <text key={name} x={LANES.left - 8} y={y} textAnchor="end" className="fill-muted text-[11px]">
-      {name}
-    </text>
-  ));
 }
 
 function describeStrip(model: ReturnType<typeof stripModel>, clock: (ms: number) => string, zone: string): string {

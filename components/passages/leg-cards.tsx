@@ -17,12 +17,18 @@ export function LegCards({ facts, workingMargin, selectedLeg, onSelectLeg }: Leg
       {facts.map((row) => (
         <li
           key={row.index}
-          onClick={() => onSelectLeg?.(row.index)}
           className={`border p-3 text-sm tabular-nums ${selectedLeg === row.index ? 'border-spruce bg-spruce/10' : 'border-line bg-panel'}`}
         >
           <div className="flex flex-wrap items-baseline justify-between gap-x-3 gap-y-1">
             <h4 className="text-base font-bold">
-              {row.index + 1} {row.name}
+              <button
+                type="button"
+                className="text-left"
+                aria-pressed={selectedLeg === row.index}
+                onClick={() => onSelectLeg?.(row.index)}
+              >
+                {row.index + 1} {row.name}
+              </button>
             </h4>
             <StateMark state={row.leg.state} withWord />
           </div>

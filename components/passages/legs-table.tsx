@@ -38,11 +38,17 @@ export function LegsTable({ facts, workingMargin, selectedLeg, onSelectLeg }: Le
         {facts.map((row) => (
           <tr
             key={row.index}
-            onClick={() => onSelectLeg?.(row.index)}
             className={`border-line border-b align-top ${selectedLeg === row.index ? 'bg-spruce/10' : ''}`}
           >
             <th scope="row" className="max-w-52 py-2.5 pr-3 font-bold">
-              {row.index + 1} {row.name}
+              <button
+                type="button"
+                className="text-left font-bold underline decoration-dotted underline-offset-4"
+                aria-pressed={selectedLeg === row.index}
+                onClick={() => onSelectLeg?.(row.index)}
+              >
+                {row.index + 1} {row.name}
+              </button>
             </th>
             <td className="py-2.5 pr-3 whitespace-nowrap">
               {row.course}

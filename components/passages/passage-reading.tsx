@@ -9,6 +9,7 @@ import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import type { EpochMs } from '@/lib/units/quantities';
 import { resultAsOfNow } from './as-of-now';
 import { CheckOrigin } from './check-origin';
+import { createFocusStore } from './focus-store';
 import { NotebookSection } from './notebook-section';
 import { PlannerMap } from './planner-map';
 import { PageLinks } from './page-links';
@@ -54,7 +55,7 @@ type StoredCheckProps = Omit<PassageReadingProps, 'check' | 'mayWrite'> & { read
 
 function StoredCheck({ passage, check, boat, nowMs }: StoredCheckProps) {
   const [selectedLeg, setSelectedLeg] = useState<number | null>(null);
-  const [focusPoint, setFocusPoint] = useState<{ readonly lat: number; readonly lon: number } | null>(null);
+  const [focus] = useState(createFocusStore);
   const now = useMemo(
     () => resultAsOfNow(check.result, passage.wind.issuedAt, nowMs),
     [check.result, passage.wind.issuedAt, nowMs],
@@ -76,12 +77,12 @@ function StoredCheck({ passage, check, boat, nowMs }: StoredCheckProps) {
         waypoints={waypoints}
         corridors={passage.route.slice(1).map((one) => one.corridorHalfWidthM)}
         check={shown}
-        focusPoint={focusPoint}
+        focus={focus}
         readOnly
         {...select}
       />
       <NotebookSection title="Passage strip" anchor="strip">
-        <PassageStrip {...shown} {...select} onFocus={setFocusPoint} />
+        <PassageStrip {...shown} {...select} onFocus={focus.set} />
       </NotebookSection>
       <ResultView result={now.result} plan={passage} sheet={check.sheet} {...select} />
     </div>

@@ -1,12 +1,13 @@
 'use client';
 
 import dynamic from 'next/dynamic';
-import { useMemo } from 'react';
+import { useMemo, useSyncExternalStore } from 'react';
 import { stripModel } from '@/components/charts/passage-strip-model';
 import { mergeReefCalls } from '@/lib/reef-calls/merge-reef-calls';
 import type { CheckResult } from '@/lib/passages/passage';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { formatInZone } from '@/lib/time/format-in-zone';
+import type { FocusStore } from './focus-store';
 import { useTheme } from './use-theme';
 
 const PassageMap = dynamic(() => import('@/components/map/passage-map').then((module) => module.PassageMap), {
@@ -27,7 +28,7 @@ interface PlannerMapProps {
   /** Null while there is no current check: then the map shows the waypoints alone. */
   readonly check: { readonly result: CheckResult; readonly plan: PassagePlan; readonly gustFactor: number } | null;
   readonly selectedLeg: number | null;
-  readonly focusPoint: { readonly lat: number; readonly lon: number } | null;
+  readonly focus: FocusStore;
   readonly readOnly?: boolean;
   onAddWaypoint?: (place: { lat: number; lon: number }) => void;
   onMoveWaypoint?: (id: string, place: { lat: number; lon: number }) => void;
@@ -39,8 +40,9 @@ interface PlannerMapProps {
 const nothing = () => undefined;
 
 /** The chart in its square-cut panel, with the track, shunts and reef calls of the current check. */
-export function PlannerMap({ check, readOnly = false, focusPoint, ...rest }: PlannerMapProps) {
+export function PlannerMap({ check, readOnly = false, focus, ...rest }: PlannerMapProps) {
   const theme = useTheme();
+  const focusPoint = useSyncExternalStore(focus.subscribe, focus.get, () => null);
   const drawn = useMemo(() => {
     if (!check) return { legs: [], shunts: [], reefCalls: [] };
     const { result, plan, gustFactor } = check;

@@ -6,6 +6,7 @@ import type { BoatSheet } from '@/lib/schemas/boat-sheet';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { draftFromPlan } from './draft-from-plan';
 import { placeOfWaypoint } from './leg-measures';
+import { createFocusStore } from './focus-store';
 import { NotebookSection } from './notebook-section';
 import { PageLinks } from './page-links';
 import { PlanFields } from './plan-fields';
@@ -37,7 +38,7 @@ export function Planner({ passage, boat }: PlannerProps) {
   const { form, check } = planner;
   const [selectedLeg, setSelectedLeg] = useState<number | null>(null);
   const [selectedWaypoint, setSelectedWaypoint] = useState<string | null>(null);
-  const [focusPoint, setFocusPoint] = useState<{ readonly lat: number; readonly lon: number } | null>(null);
+  const [focus] = useState(createFocusStore);
   const { plan } = form.reading;
   const current = useMemo(
     () => (check.status === 'current' && plan ? { result: check.result, plan, gustFactor: sheet.gustFactor } : null),
@@ -69,7 +70,7 @@ export function Planner({ passage, boat }: PlannerProps) {
             onSelectWaypoint={setSelectedWaypoint}
             check={current}
             selectedLeg={selectedLeg}
-            focusPoint={focusPoint}
+            focus={focus}
             onAddWaypoint={(place) => dispatch({ type: 'addWaypoint', ...place })}
             onMoveWaypoint={(id, place) => dispatch({ type: 'moveWaypoint', id, ...place })}
             onInsertWaypoint={(shownLeg, place) => {
@@ -87,7 +88,7 @@ export function Planner({ passage, boat }: PlannerProps) {
       <div className="mt-8">
         <NotebookSection title="Passage strip" anchor="strip">
           {current ? (
-            <PassageStrip {...current} selectedLeg={selectedLeg} onSelectLeg={setSelectedLeg} onFocus={setFocusPoint} />
+            <PassageStrip {...current} selectedLeg={selectedLeg} onSelectLeg={setSelectedLeg} onFocus={focus.set} />
           ) : (
             <p className="text-muted text-sm">
               The legs are laid along time here as soon as track, departure and wind can be checked.
