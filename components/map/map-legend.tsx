@@ -1,16 +1,12 @@
 import type { ReactNode } from 'react';
+import { STATE_WORDS } from '@/components/charts/state-words';
 import type { CheckState } from '@/lib/passages/passage';
 import { LineSample } from './line-sample';
 import { MarkIcon } from './mark-icon';
 import type { MapPalette } from './map-palette';
 import type { MarkName } from './marks';
 
-const STATES: readonly (readonly [CheckState, string])[] = [
-  ['within', 'within limits'],
-  ['thin', 'little margin'],
-  ['beyond', 'beyond righting moment'],
-  ['unknown', 'not known'],
-];
+const STATES: readonly CheckState[] = ['within', 'thin', 'beyond', 'unknown'];
 const MARK_WORDS: readonly (readonly [MarkName, string])[] = [
   ['shunt', 'shunt'],
   ['reef-call', 'reef call'],
@@ -36,7 +32,7 @@ export function MapLegend({ palette }: { readonly palette: MapPalette }) {
       <ul>
         <Entry drawing={<LineSample palette={palette} end="A" />} words="end A leads: whole line with ticks" />
         <Entry drawing={<LineSample palette={palette} end="B" />} words="end B leads: long dashes" />
-        {STATES.map(([state, words]) => (
+        {STATES.map((state) => (
           <Entry
             key={state}
             drawing={
@@ -45,7 +41,7 @@ export function MapLegend({ palette }: { readonly palette: MapPalette }) {
                 <MarkIcon name={`state-${state}`} palette={palette} />
               </>
             }
-            words={words}
+            words={STATE_WORDS[state]}
           />
         ))}
         {MARK_WORDS.map(([name, words]) => (
