@@ -10,7 +10,11 @@ import {
 } from 'react';
 
 interface FieldProps {
+  /** Of the control, where a link must find it; else one is made. */
+  readonly id?: string;
   readonly label: string;
+  /** On a wide screen a column's head stands for it: only read out there. */
+  readonly underHead?: boolean;
   readonly hint?: ReactNode;
   readonly problem?: string | undefined;
   /** Shown behind the control and read with its label. */
@@ -32,19 +36,20 @@ interface FrameProps extends FieldProps {
 }
 
 /** Label, control, hint and message of one field, tied together for eye and ear. */
-export function Field({ label, hint, problem, unit, className, children }: FrameProps) {
-  const id = useId();
+export function Field({ id: givenId, label, underHead, hint, problem, unit, className, children }: FrameProps) {
+  const ownId = useId();
+  const id = givenId ?? ownId;
   const described = [problem && `${id}-problem`, hint && `${id}-hint`].filter(Boolean).join(' ');
   return (
     <div className={`min-w-0 ${className ?? ''}`}>
-      <label htmlFor={id} className="mb-1 block font-bold">
+      <label htmlFor={id} className={`mb-1 block font-bold ${underHead ? 'md:sr-only' : ''}`}>
         {label}
         {unit && <span className="sr-only">, {unit}</span>}
       </label>
       <span className="flex items-center gap-2">
         {children({ id, 'aria-invalid': problem ? true : undefined, 'aria-describedby': described || undefined })}
         {unit && (
-          <span aria-hidden="true" className="text-muted shrink-0">
+          <span aria-hidden="true" className={`text-muted shrink-0 ${underHead ? 'md:hidden' : ''}`}>
             {unit}
           </span>
         )}
@@ -68,9 +73,9 @@ type Of<Attributes> = FieldProps & Omit<Attributes, 'id' | 'className'>;
 export function TextInput(
   props: Of<InputHTMLAttributes<HTMLInputElement>> & { readonly ref?: ComponentProps<'input'>['ref'] },
 ) {
-  const { label, hint, problem, unit, className, ...rest } = props;
+  const { id, label, underHead, hint, problem, unit, className, ...rest } = props;
   return (
-    <Field {...({ label, hint, problem, unit, className } as FieldProps)}>
+    <Field {...({ id, label, underHead, hint, problem, unit, className } as FieldProps)}>
       {(ids) => <input {...ids} className={CONTROL} {...rest} />}
     </Field>
   );
@@ -86,9 +91,9 @@ export function NumberInput(
 export function TextArea(
   props: Of<TextareaHTMLAttributes<HTMLTextAreaElement>> & { readonly ref?: ComponentProps<'textarea'>['ref'] },
 ) {
-  const { label, hint, problem, unit, className, ...rest } = props;
+  const { id, label, underHead, hint, problem, unit, className, ...rest } = props;
   return (
-    <Field {...({ label, hint, problem, unit, className } as FieldProps)}>
+    <Field {...({ id, label, underHead, hint, problem, unit, className } as FieldProps)}>
       {(ids) => <textarea {...ids} className={CONTROL} {...rest} />}
     </Field>
   );
@@ -97,20 +102,22 @@ export function TextArea(
 export function SelectInput(
   props: Of<SelectHTMLAttributes<HTMLSelectElement>> & { readonly ref?: ComponentProps<'select'>['ref'] },
 ) {
-  const { label, hint, problem, unit, className, ...rest } = props;
+  const { id, label, underHead, hint, problem, unit, className, ...rest } = props;
   return (
-    <Field {...({ label, hint, problem, unit, className } as FieldProps)}>
+    <Field {...({ id, label, underHead, hint, problem, unit, className } as FieldProps)}>
       {(ids) => <select {...ids} className={CONTROL} {...rest} />}
     </Field>
   );
 }
 
 export function Checkbox({
+  id: givenId,
   label,
   hint,
   ...rest
 }: Of<InputHTMLAttributes<HTMLInputElement>> & { readonly ref?: ComponentProps<'input'>['ref'] }) {
-  const id = useId();
+  const ownId = useId();
+  const id = givenId ?? ownId;
   return (
     <div className="min-w-0">
       <label htmlFor={id} className="flex min-h-11 items-center gap-3">

@@ -1,0 +1,21 @@
+import type { Metadata } from 'next';
+import { BoatList } from '@/components/boats/boat-list';
+import { HiddenBoats } from '@/components/boats/hidden-boats';
+import { ButtonLink } from '@/components/ui/button';
+import { PageTitle } from '@/components/ui/page-title';
+import { listBoats } from '@/lib/usecases/boats/list-boats';
+import { pageContext } from '@/lib/web/contexts';
+import { bringBack } from './actions';
+
+export const metadata: Metadata = { title: 'Boats' };
+
+export default async function BoatsPage() {
+  const { boats, hidden } = await listBoats(await pageContext('/boats'));
+  return (
+    <>
+      <PageTitle title="Boats" actions={<ButtonLink href="/boats/new">New boat</ButtonLink>} />
+      <BoatList boats={boats} />
+      <HiddenBoats boats={hidden} bringBack={bringBack} />
+    </>
+  );
+}
