@@ -3,7 +3,6 @@ import { forecastAgeH, OLD_FORECAST_H } from '@/lib/passages/flags/forecast-flag
 import type { FollowedPassage } from '@/lib/passages/follow-passage';
 import type { CheckResult, Flag, Passage } from '@/lib/passages/passage';
 import { reefHolds } from '@/lib/passages/reef-holds';
-import { reefHolds } from '@/lib/passages/reef-holds';
 import type { Hours } from '@/lib/units/quantities';
 
 type Warning = CheckResult['warnings'][number];
