@@ -18,7 +18,7 @@ export const vakaSchema = z.object({
     unit: 'm',
     min: -2,
     max: 0,
-    hint: 'It lies under the waterline: write it as zero or a negative number of metres.',
+    hintOver: 'It lies under the waterline: write it as zero or a negative number of metres.',
   }),
 });
 
@@ -36,7 +36,7 @@ export const podSchema = z.object({
     unit: 'm',
     min: 0.05,
     max: 6,
-    hint: 'Give the distance to leeward of the vaka’s centreline as a positive number of metres.',
+    hintUnder: 'Give the distance to leeward of the vaka’s centreline as a positive number of metres.',
   }),
   bottomHeightM: numberField({ what: 'Height of the pod’s bottom', unit: 'm', min: 0, max: 3 }),
 });
@@ -109,7 +109,7 @@ export const boatFields = {
     unit: 'm',
     min: 0.3,
     max: 15,
-    hint: 'The ama is to windward, so the span is a positive number of metres.',
+    hintUnder: 'The ama is to windward, so the span is a positive number of metres.',
   }),
   masses: z.array(massSchema).min(1, { error: 'Masses: give at least one item.' }).max(200),
   vaka: vakaSchema.optional(),
@@ -121,21 +121,21 @@ export const boatFields = {
     unit: 'm',
     min: -4,
     max: 0,
-    hint: 'It lies under the waterline: write it as zero or a negative number of metres.',
+    hintOver: 'It lies under the waterline: write it as zero or a negative number of metres.',
   }),
   gustFactor: numberField({
     what: 'Gust factor',
     unit: '',
     min: 1,
     max: 3,
-    hint: 'A gust is never under the mean: give 1 or more.',
+    hintUnder: 'A gust is never under the mean: give 1 or more.',
   }).default(1.35),
   workingMargin: numberField({
     what: 'Working margin',
     unit: '',
     min: 1,
     max: 5,
-    hint: 'Under 1 the reef would be called after she has gone over: give 1 or more.',
+    hintUnder: 'Under 1 the reef would be called after she has gone over: give 1 or more.',
   }).default(1.5),
   windHeightExponent: numberField({ what: 'Wind height exponent', unit: '', min: 0, max: 0.4 }).default(0),
   reefs: z

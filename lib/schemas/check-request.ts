@@ -12,14 +12,14 @@ export const latField = numberField({
   unit: '°',
   min: -85,
   max: 85,
-  hint: 'Degrees north, negative to the south; charts here end at 85°.',
+  hintOver: 'Degrees north, negative to the south; charts here end at 85°.',
 });
 export const lonField = numberField({
   what: 'Longitude',
   unit: '°',
   min: -180,
   max: 180,
-  hint: 'Degrees east, negative to the west.',
+  hintOver: 'Degrees east, negative to the west: 190° east is written −170.',
 });
 
 export const waypointSchema = z.object({

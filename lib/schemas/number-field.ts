@@ -6,21 +6,26 @@ interface NumberFieldOptions {
   readonly unit: string;
   readonly min: number;
   readonly max: number;
-  /** How to mend a value out of range, where there is more to say than the range. */
-  readonly hint?: string;
+  /** How to mend a value under or over the range, where there is more to say than the unit: mostly a wrong sign. */
+  readonly hintUnder?: string;
+  readonly hintOver?: string;
 }
 
 /**
  * A number with a range that is possible for a small craft, and a message that says what is wrong, where
  * and how to mend it. The ranges catch crossed units (0.5 m written as 500), not poor design.
  */
-export function numberField({ what, unit, min, max, hint }: NumberFieldOptions) {
+export function numberField({ what, unit, min, max, hintUnder, hintOver }: NumberFieldOptions) {
   const range = `${min} to ${max}${unit ? ` ${unit}` : ''}`;
-  const mend = hint ?? (unit ? `Check the unit: ${what.toLowerCase()} is in ${unit}.` : 'Check the value.');
+  const checkUnit = unit ? `Check the unit: it is given in ${unit}.` : 'Check the value.';
   return z
     .number({ error: `${what}: give a number${unit ? ` in ${unit}` : ''}, ${range}.` })
-    .min(min, { error: (issue) => `${what}: ${String(issue.input)} is under the possible ${range}. ${mend}` })
-    .max(max, { error: (issue) => `${what}: ${String(issue.input)} is over the possible ${range}. ${mend}` });
+    .min(min, {
+      error: (issue) => `${what}: ${String(issue.input)} is under the possible ${range}. ${hintUnder ?? checkUnit}`,
+    })
+    .max(max, {
+      error: (issue) => `${what}: ${String(issue.input)} is over the possible ${range}. ${hintOver ?? checkUnit}`,
+    });
 }
 
 /** A short text that must be given. */
