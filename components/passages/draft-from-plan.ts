@@ -10,6 +10,11 @@ export function degreesText(degrees: number): string {
   return String(Math.round(degrees * 1e5) / 1e5);
 }
 
+/** What was stored, to a tenth of a metre: minutes typed as thirds of a degree would fill the field with digits. */
+function storedDegreesText(degrees: number): string {
+  return String(Math.round(degrees * 1e6) / 1e6);
+}
+
 /** What is saved, as it is typed. Parts a new passage does not have yet stay empty. */
 export function draftFromPlan(plan: Partial<PassagePlan> & { readonly name: string }, usualZone: string): PlanDraft {
   const zone = plan.zone && isZone(plan.zone) ? plan.zone : usualZone;
@@ -20,8 +25,8 @@ export function draftFromPlan(plan: Partial<PassagePlan> & { readonly name: stri
   const waypoints = (plan.route ?? []).map((waypoint) => ({
     id: id(),
     name: waypoint.name,
-    lat: String(waypoint.lat),
-    lon: String(waypoint.lon),
+    lat: storedDegreesText(waypoint.lat),
+    lon: storedDegreesText(waypoint.lon),
     corridor: numberText(waypoint.corridorHalfWidthM) || USUAL_CORRIDOR_M,
   }));
   const windRows = (plan.wind?.rows ?? []).map((row) => ({

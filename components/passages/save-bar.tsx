@@ -27,7 +27,7 @@ export function SaveBar({ planner, passageId }: { readonly planner: Planner; rea
           {saving.busy ? 'Saving…' : unsaved ? 'Not saved yet' : 'Saved'}
         </span>
         <ButtonLink href={`/passages/${passageId}`} variant="plain">
-          Read
+          Stored check
         </ButtonLink>
         <Button onClick={save} disabled={saving.busy}>
           Save
