@@ -11,17 +11,19 @@ knex_cli() {
   node --import tsx node_modules/knex/bin/cli.js --knexfile knexfile.ts "$@"
 }
 
+without_stack() { grep -v '^ *at ' <<<"$1" | tail -n 12; }
+
 migrate() {
   local output
   output=$(knex_cli migrate:latest 2>&1) || fail "The database could not be brought up to date:
-$output"
+$(without_stack "$output")"
 }
 
 # Knex's seeds; the demo's own seed leaves a database alone that has it already.
 seed_demo() {
   local output
   output=$(TWOBOW_DEMO=1 knex_cli seed:run 2>&1) || fail "The demo could not be put into the database:
-$output"
+$(without_stack "$output")"
 }
 
 # Builds into TWOBOW_DIST_DIR where the sources are not those of the last build there.

@@ -14,7 +14,7 @@ install_debian_packages() {
   command -v apt-get >/dev/null || fail "$what_for is missing, and this machine has no apt-get. Install it ($*) and start again."
   if [ "$(id -u)" != 0 ]; then
     if command -v sudo >/dev/null && { sudo -n true 2>/dev/null || [ -t 0 ]; }; then
-      as_root=(sudo)
+      as_root=(sudo env DEBIAN_FRONTEND=noninteractive)
     else
       fail "$what_for is missing, and only root may install it. Run this as root, then start again:
     $by_hand"
