@@ -1,13 +1,10 @@
+import { featureCollection, point } from '@turf/turf';
 import type { Feature, FeatureCollection, Point } from 'geojson';
 import type { MapLeg, MapPlace, MapReefCall } from './map-types';
 import type { MarkName } from './marks';
 
 function mark(place: MapPlace, name: MarkName, label = ''): Feature<Point> {
-  return {
-    type: 'Feature',
-    properties: { mark: name, label },
-    geometry: { type: 'Point', coordinates: [place.lon, place.lat] },
-  };
+  return point([place.lon, place.lat], { mark: name, label });
 }
 
 function flagMark(code: string, severity: string): MarkName {
@@ -27,13 +24,10 @@ export function markFeatures(
       lat === null || lon === null || severity === 'notice' ? [] : [mark({ lat, lon }, flagMark(code, severity))],
     ),
   );
-  return {
-    type: 'FeatureCollection',
-    features: [
-      ...shunts.map((place) => mark(place, 'shunt')),
-      ...reefCalls.map((call) => mark(call, 'reef-call', call.label)),
-      ...flags,
-      ...(focus ? [mark(focus, 'focus')] : []),
-    ],
-  };
+  return featureCollection([
+    ...shunts.map((place) => mark(place, 'shunt')),
+    ...reefCalls.map((call) => mark(call, 'reef-call', call.label)),
+    ...flags,
+    ...(focus ? [mark(focus, 'focus')] : []),
+  ]);
 }

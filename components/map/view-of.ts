@@ -1,3 +1,4 @@
+import { bbox, multiPoint } from '@turf/turf';
 import type { MapPlace } from './map-types';
 
 /** The middle of the sample chart's islands, for a passage without waypoints. */
@@ -13,10 +14,9 @@ export function viewOf(waypoints: readonly MapPlace[]): {
   readonly fitBoundsOptions: { readonly padding: typeof PADDING; readonly maxZoom: number };
 } {
   const places = waypoints.length > 0 ? waypoints : ISLANDS;
-  const lats = places.map((place) => place.lat);
-  const lons = places.map((place) => place.lon);
+  const [west, south, east, north] = bbox(multiPoint(places.map(({ lon, lat }) => [lon, lat])));
   return {
-    bounds: [Math.min(...lons), Math.min(...lats), Math.max(...lons), Math.max(...lats)],
+    bounds: [west, south, east, north],
     fitBoundsOptions: { padding: PADDING, maxZoom: 11 },
   };
 }
