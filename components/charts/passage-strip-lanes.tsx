@@ -10,11 +10,11 @@ interface LaneProps {
 /** Reef calls as flags at the time of the call; the name runs on as far as the next one. */
 export function StripReefs({ model, layout, clock }: LaneProps & { readonly clock: (ms: number) => string }) {
   const { top, height } = LANES.reefs;
-  const { x, width } = layout;
+  const { x } = layout;
   return model.calls.map((call, i) => {
     const left = x(Math.max(model.startMs, Date.parse(call.at)));
     const next = model.calls[i + 1];
-    const right = next ? x(Date.parse(next.at)) : width - LANES.right;
+    const right = x(next ? Date.parse(next.at) : (model.unknownFromMs ?? model.endMs));
     const by = Math.min(x(Date.parse(call.by)), right);
     const most = Math.floor((right - left - 10) / 6.2);
     const name = call.reef.length <= most ? call.reef : `${call.reef.slice(0, Math.max(0, most - 1))}…`;

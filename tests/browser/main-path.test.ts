@@ -158,7 +158,9 @@ describe('the main path', () => {
   it('shows the verdict of the typed wind, and changes it with the wind', async () => {
     await page.getByLabel('Departure, date and time').fill(`${day} 10:00`);
     await page.getByLabel('Source of the wind, in words').fill('By radio, invented');
-    await page.getByLabel('Issued, date and time').fill(`${new Date(Date.now() - 3_600_000).toISOString().slice(0, 16)}Z`);
+    await page
+      .getByLabel('Issued, date and time')
+      .fill(`${new Date(Date.now() - 3_600_000).toISOString().slice(0, 16)}Z`);
     await page.getByRole('button', { name: 'Add a wind row' }).click();
     await page.getByRole('button', { name: 'Add a wind row' }).click();
     await typeWind(1, '08:00', '200', '6', '8');
