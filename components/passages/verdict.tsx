@@ -1,7 +1,7 @@
 import { Caution } from '@/components/charts/caution';
 import { StateMark } from '@/components/charts/state-mark';
 import { STATE_WORDS } from '@/components/charts/state-words';
-import { describeLegState, worstLegIndex } from '@/lib/passage-check/describe';
+import { dangersBeside, describeLegState, worstLegIndex } from '@/lib/passage-check/describe';
 import type { CheckResult } from '@/lib/passages/passage';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { legScene } from './leg-scene';
@@ -26,7 +26,26 @@ export function Verdict({ result, plan, reefNames }: VerdictProps) {
           <p className="mt-1">{describeLegState(leg, legScene(plan, worst, reefNames))}</p>
         </>
       )}
+      <Besides dangers={dangersBeside(result.legs, (index) => legScene(plan, index, reefNames))} />
     </VerdictFrame>
+  );
+}
+
+const SHOWN = 3;
+
+/** What the state does not tell, so that no calm headline stands alone over land on the track. */
+function Besides({ dangers }: { readonly dangers: readonly string[] }) {
+  if (dangers.length === 0) return null;
+  return (
+    <div className="mt-2" data-testid="dangers-beside">
+      <p className="font-bold">Besides:</p>
+      <ul className="list-inside list-disc">
+        {dangers.slice(0, SHOWN).map((danger) => (
+          <li key={danger}>{danger}</li>
+        ))}
+        {dangers.length > SHOWN && <li>and {dangers.length - SHOWN} more, under the legs.</li>}
+      </ul>
+    </div>
   );
 }
 

@@ -76,6 +76,19 @@ export function describeLegState(leg: LegResult, scene: LegScene): string {
   return first.sentence;
 }
 
+/**
+ * Dangers that no state tells of, since a state is about moments alone: land on the track, a limit passed, nothing made
+ * good. One sentence a flag, leg by leg; a verdict must not be shown without them.
+ */
+export function dangersBeside(legs: readonly LegResult[], sceneOf: (legIndex: number) => LegScene): readonly string[] {
+  const makeStates = new Set(Object.values(MADE_BY).flat());
+  return legs.flatMap((leg, index) =>
+    leg.flags
+      .filter(({ code, severity }) => severity === 'danger' && !makeStates.has(code))
+      .map((flag) => describeFlag(flag, sceneOf(index)).sentence),
+  );
+}
+
 /** The worst leg of a passage: by state, then by load share. Null without legs. */
 export function worstLegIndex(legs: readonly Pick<LegResult, 'state' | 'largestLoadShare'>[]): number | null {
   const grave = { beyond: 3, unknown: 2, thin: 1, within: 0 } as const;
