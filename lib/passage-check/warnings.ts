@@ -54,12 +54,15 @@ function boatWarnings({ boat, stream }: Passage, hasCurve: boolean): Warning[] {
   return warnings;
 }
 
+/** Less than this apart, the two winds read the same on screen. */
+const SHOWN_APART_KN = 0.1;
+
 function carryWarnings({ boat }: Passage): Warning[] {
   return boat.reefs.flatMap((reef, reefIndex) => {
     const carried = [reef.carryUpToMeanKn, reef.carryUpToGustKn && reef.carryUpToGustKn / boat.gustFactor];
     const carryUpToKn = Math.max(...carried.map((kn) => kn ?? 0));
     const holdsUpToKn = carryUpToKn > 0 ? reefHolds(boat, reef).worstKn : 0;
-    if (carryUpToKn <= holdsUpToKn) return [];
+    if (carryUpToKn - holdsUpToKn < SHOWN_APART_KN) return [];
     const numbers = { reefIndex, carryUpToKn, holdsUpToKn };
     const message = `“${reef.name}” is carried up to a mean of ${carryUpToKn.toFixed(1)} kn, but holds up to ${holdsUpToKn.toFixed(1)} kn at its worst wind angle. The check calls the next reef from there.`;
     return [warn(flagAt('carry-above-holds', 'caution', null, numbers), message)];
