@@ -14,6 +14,7 @@ import { LiveFigures } from './live-figures';
 import { MassesSection } from './masses-section';
 import { MeasuresSection } from './measures-section';
 import { PolarSection } from './polar-section';
+import { nameRows } from './name-rows';
 import { ReefsSection } from './reefs-section';
 import type { SaveBoat } from './save-boat';
 import { SaveNotice } from './save-notice';
@@ -45,7 +46,7 @@ export function BoatForm({ initial, boatId, basedOnNumber, save }: BoatFormProps
   });
   const { errors, isDirty, isSubmitting } = form.formState;
   useUnsavedWarning(isDirty && !saved);
-  const problems = listProblems(errors);
+  const problems = nameRows(listProblems(errors), form.getValues('sheet'));
   const summary = useRef<HTMLDivElement>(null);
   useEffect(() => {
     if (tries > 0) summary.current?.focus();

@@ -30,7 +30,7 @@ export function HeelingTable({ loads, workingMargin, hasCurve }: HeelingTablePro
       <tbody>
         {loads.map(({ reef, load }) => (
           <tr key={reef.name}>
-            <Cell className="font-bold">{reef.name}</Cell>
+            <Cell className="min-w-28 font-bold">{reef.name}</Cell>
             <Cell>
               <StateMark state={load.state} withWord size={20} />
             </Cell>

@@ -9,7 +9,7 @@ import { RowsFoot } from './rows-foot';
 import { emptyMass, type SheetForm } from './sheet-form';
 import { useRows } from './use-rows';
 
-const GRID = 'grid grid-cols-3 gap-x-3 gap-y-2 md:grid-cols-[minmax(0,1fr)_6rem_6rem_6rem_8rem_auto] md:items-start';
+const GRID = 'grid grid-cols-3 gap-x-3 gap-y-2 md:grid-cols-[minmax(0,1fr)_6rem_6rem_6rem_8rem_9rem] md:items-start';
 
 /** Every mass item with where it stands. */
 export function MassesSection() {

@@ -22,7 +22,7 @@ export function MassesTable({ figures }: { readonly figures: BoatFigures }) {
         <tbody>
           {sheet.masses.map(({ label, kind, kg, yM, zM }, index) => (
             <tr key={index}>
-              <Cell>{label}</Cell>
+              <Cell className="min-w-36 break-words">{label}</Cell>
               <Cell className="text-muted">{kind}</Cell>
               <Cell className="text-right">{figure(kg, 1)}</Cell>
               <Cell className="text-right">{figure(yM, 2)}</Cell>

@@ -58,7 +58,7 @@ function ReefRow({ row }: { readonly row: ReefFigures }) {
   const { reef, holds, byPoint, carriedTooFar } = row;
   return (
     <tr>
-      <Cell className="bg-panel sticky left-0 font-bold">{reef.name}</Cell>
+      <Cell className="bg-panel sticky left-0 min-w-24 font-bold">{reef.name}</Cell>
       <Cell className="text-right whitespace-nowrap">
         <Carry reef={reef} />
       </Cell>

@@ -9,7 +9,7 @@ import { emptyReef, type SheetForm } from './sheet-form';
 import { useRows } from './use-rows';
 
 const GRID =
-  'grid grid-cols-2 gap-x-3 gap-y-2 md:grid-cols-[minmax(0,1fr)_6rem_6rem_6rem_6rem_6rem_auto] md:items-start';
+  'grid grid-cols-2 gap-x-3 gap-y-2 md:grid-cols-[minmax(0,1fr)_6rem_6rem_6rem_6rem_6rem_9rem] md:items-start';
 
 /** The reef table as the owner gives it. */
 export function ReefsSection() {

@@ -30,10 +30,8 @@ export function SheetReading({ sheet, children }: SheetReadingProps) {
           {text}
         </Notice>
       ))}
-      <div className="grid gap-6 xl:grid-cols-2">
-        <RightingPanel figures={figures} />
-        <HeelingBench sheet={sheet} />
-      </div>
+      <RightingPanel figures={figures} />
+      <HeelingBench sheet={sheet} />
       <ReefTable figures={figures} />
       <div className="grid gap-6 lg:grid-cols-2">
         <MassesTable figures={figures} />

@@ -24,7 +24,13 @@ const RECHECK_MS = 300;
 
 /** The edit form's state and its saving. Whatever the server answers, what was typed stays. */
 export function useSheetForm({ initial, boatId, basedOnNumber, save, onSaved }: SheetFormOptions) {
-  const form = useForm<SheetForm>({ defaultValues: initial, resolver: resolveSheetForm, mode: 'onBlur' });
+  const form = useForm<SheetForm>({
+    defaultValues: initial,
+    resolver: resolveSheetForm,
+    mode: 'onBlur',
+    // The summary takes the focus: it names them all.
+    shouldFocusError: false,
+  });
   const [answer, setAnswer] = useState<SaveBoatAnswer | null>(null);
   const [tries, setTries] = useState(0);
   useRecheck(form);
