@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { check, completeRequest, routeOf, steadyWind } from '../../builders/check-request';
+import { check, completeRequest, DEPARTURE, routeOf, steadyWind } from '../../builders/check-request';
 
 const reefIndexOf = (name: string) => completeRequest().boat.reefs.findIndex((reef) => reef.name === name);
 
@@ -88,6 +88,36 @@ describe('invariants of the check', () => {
         expect(turnsOf(1)).toBe(Math.ceil(halfWidths));
       }),
       { numRuns: 40 },
+    );
+  });
+
+  it('in winds that shift by up to 30° in three hours she is never left at a waypoint that she cannot quite lay', () => {
+    const anyWind = fc.tuple(
+      fc.integer({ min: 0, max: 359 }),
+      fc.array(fc.tuple(fc.integer({ min: -30, max: 30 }), fc.double({ min: 5, max: 18, noNaN: true })), {
+        minLength: 20,
+        maxLength: 20,
+      }),
+    );
+    fc.assert(
+      fc.property(anyWind, ([firstDeg, steps]) => {
+        const request = completeRequest();
+        request.boat.leewayDeg = 5;
+        request.route = routeOf([290, 330, 345, 70].map((courseDeg) => ({ courseDeg, nmi: 6, halfWidthM: 600 })));
+        let fromDeg = firstDeg;
+        request.wind.rows = steps.map(([shift, meanKn], index) => {
+          fromDeg = (fromDeg + shift + 360) % 360;
+          return { time: new Date(DEPARTURE + index * 3 * 3_600_000).toISOString(), fromDeg, meanKn };
+        });
+        const { legs, totals } = check(request);
+        expect(legs.flatMap((leg) => leg.flags.map((flag) => flag.code))).not.toContain('no-room');
+        expect(totals.arrival).not.toBeNull();
+        // Track and legs run on without a gap, in order of time.
+        const times = legs.flatMap((leg) => leg.track.map((point) => Date.parse(point[2])));
+        expect(times.every((time, index) => index === 0 || time >= times[index - 1]!)).toBe(true);
+        legs.slice(1).forEach((leg, index) => expect(leg.start).toBe(legs[index]!.end));
+      }),
+      { numRuns: 60 },
     );
   });
 });
