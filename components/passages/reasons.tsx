@@ -47,12 +47,12 @@ export function Reasons({ result, plan, reefNames }: ReasonsProps) {
         <section key={leg.name}>
           <h4 className="mb-1 font-bold">{leg.name}</h4>
           <ul className="space-y-2">
-            {leg.found.map(({ flag, sentence, whatToDo }: Description & { flag: Flag }) => (
+            {leg.found.map(({ flag, sentence, remedy }: Description & { flag: Flag }) => (
               <Reason
                 key={`${flag.code}-${flag.at ?? ''}`}
                 severity={flag.severity}
                 sentence={sentence}
-                whatToDo={whatToDo}
+                remedy={remedy}
               />
             ))}
           </ul>
@@ -68,14 +68,14 @@ export function Reasons({ result, plan, reefNames }: ReasonsProps) {
 interface ReasonProps {
   readonly severity: Severity;
   readonly sentence: string;
-  readonly whatToDo?: string;
+  readonly remedy?: string;
 }
 
-function Reason({ severity, sentence, whatToDo }: ReasonProps) {
+function Reason({ severity, sentence, remedy }: ReasonProps) {
   return (
     <li className={`border-l-4 pl-3 ${EDGE[severity]}`}>
       <span className="font-bold">{WORD[severity]}.</span> {sentence}
-      {whatToDo && <span className="text-muted block">{whatToDo}</span>}
+      {remedy && <span className="text-muted block">{remedy}</span>}
     </li>
   );
 }

@@ -18,7 +18,7 @@ export interface LegScene {
 export interface Description {
   /** "Leg 3, 14:20, off the point: gust 24 kn gives 1.31 × her righting moment with two panels in." */
   readonly sentence: string;
-  readonly whatToDo: string;
+  readonly remedy: string;
 }
 
 /** A flag in words with its numbers, and what may be done about it. */
@@ -28,7 +28,7 @@ export function describeFlag(flag: Flag, scene: LegScene): Description {
   const reef = reefIndex === undefined ? undefined : scene.reefNames[reefIndex];
   return {
     sentence: `${whereAndWhen(flag, scene)}: ${words.says(flag.numbers, reef ?? 'the sail she carries')}.`,
-    whatToDo: words.whatToDo,
+    remedy: words.remedy,
   };
 }
 

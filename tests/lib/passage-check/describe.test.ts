@@ -29,11 +29,11 @@ describe('flags in words', () => {
     request.wind = steadyWind(180, 34, 46);
     const [leg] = check(request).legs;
     const flag = leg!.flags.find(({ code }) => code === 'beyond-righting-moment')!;
-    const { sentence, whatToDo } = describeFlag(flag, scene);
+    const { sentence, remedy } = describeFlag(flag, scene);
     expect(sentence).toMatch(/^Leg 1, 09:\d\d, /);
     expect(sentence).toContain('gust 46 kn gives');
     expect(sentence).toContain(`${leg!.largestLoadShare!.toFixed(2)} × her righting moment with “second”`);
-    expect(whatToDo.length).toBeGreaterThan(20);
+    expect(remedy.length).toBeGreaterThan(20);
     expect(describeLegState(leg!, scene)).toBe(sentence);
   });
 
@@ -41,7 +41,7 @@ describe('flags in words', () => {
     for (const code of Object.keys(FLAG_WORDS) as Flag['code'][]) {
       const flag: Flag = { code, severity: 'danger', at: null, lat: null, lon: null, numbers: {} };
       expect(describeFlag(flag, scene).sentence).toMatch(/^Leg 1: .+\.$/);
-      expect(FLAG_WORDS[code].whatToDo).not.toMatch(/\bgo\b|safe/i);
+      expect(FLAG_WORDS[code].remedy).not.toMatch(/\bgo\b|safe/i);
     }
   });
 });
