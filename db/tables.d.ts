@@ -8,7 +8,8 @@ export interface UserRow {
   id: string;
   email: string;
   name: string;
-  password_hash: string;
+  /** Null until the person has chosen one by a mailed link. */
+  password_hash: string | null;
   session_version: number;
   created_at: Date;
   updated_at: Date;

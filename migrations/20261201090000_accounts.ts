@@ -7,7 +7,7 @@ export async function up(knex: Knex): Promise<void> {
       id uuid PRIMARY KEY DEFAULT gen_random_uuid(),
       email text NOT NULL CONSTRAINT users_email_form CHECK (length(email) <= 254 AND email ~ '^[^@[:space:]]+@[^@[:space:]]+$'),
       name text NOT NULL CONSTRAINT users_name_length CHECK (length(btrim(name)) BETWEEN 1 AND 80),
-      password_hash text NOT NULL CONSTRAINT users_password_is_argon2id CHECK (password_hash LIKE '$argon2id$%'),
+      password_hash text CONSTRAINT users_password_is_argon2id CHECK (password_hash LIKE '$argon2id$%'),
       session_version integer NOT NULL DEFAULT 1 CHECK (session_version >= 1),
       created_at timestamptz NOT NULL DEFAULT now(),
       updated_at timestamptz NOT NULL DEFAULT now()

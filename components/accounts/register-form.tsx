@@ -2,7 +2,6 @@
 
 import { useActionState } from 'react';
 import { FormFrame } from '@/components/accounts/form-frame';
-import { ButtonLink } from '@/components/ui/button';
 import { TextInput } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { emptyForm, type FormAction } from '@/lib/schemas/form-state';
@@ -11,11 +10,10 @@ export function RegisterForm({ action }: { readonly action: FormAction }) {
   const [state, send, pending] = useActionState(action, emptyForm);
   if (state.done) {
     return (
-      <Notice tone="good" title="Registered" live>
-        <p>A mail is on its way to that address. If it had no account, it has one now: sign in with your password.</p>
-        <p className="mt-3">If it had one before, nothing was changed, and the mail says how to go on.</p>
-        <p className="mt-4">
-          <ButtonLink href="/sign-in">Sign in</ButtonLink>
+      <Notice tone="good" title="Look into your mail" live>
+        <p>We have written to that address. Open the link in the mail within 24 hours and choose your password.</p>
+        <p className="mt-3">
+          If the address has an account already, nothing was changed, and the mail says how to go on.
         </p>
       </Notice>
     );
@@ -25,7 +23,7 @@ export function RegisterForm({ action }: { readonly action: FormAction }) {
     <FormFrame action={send} pending={pending} problem={state.problem} submit="Register">
       <TextInput
         label="Name"
-        hint="The crew see it beside what you do."
+        hint="The crew see it beside what you do. The password comes next, by a link in a mail."
         name="name"
         autoComplete="name"
         defaultValue={values.name ?? ''}
@@ -40,14 +38,6 @@ export function RegisterForm({ action }: { readonly action: FormAction }) {
         spellCheck={false}
         defaultValue={values.email ?? ''}
         problem={problems.email}
-      />
-      <TextInput
-        label="Password"
-        hint="At least 12 characters. A few words in a row are fine."
-        name="password"
-        type="password"
-        autoComplete="new-password"
-        problem={problems.password}
       />
     </FormFrame>
   );

@@ -1,29 +1,26 @@
 import type { Knex } from 'knex';
 import type { UserRow } from '@/db/tables';
-import { isUniqueViolation } from '@/db/is-unique-violation';
 
 export interface Credentials {
   readonly id: string;
   readonly email: string;
   readonly name: string;
-  readonly passwordHash: string;
+  /** Null until a password was chosen by a mailed link: nobody can sign in before. */
+  readonly passwordHash: string | null;
   readonly sessionVersion: number;
 }
 
-/** Adds a person. Null where the e-mail, in any case of letters, is taken. */
+/** Adds a person. Null where the e-mail, in any case of letters, is taken; a transaction lives on all the same. */
 export async function insertUser(
   db: Knex,
-  user: { email: string; name: string; passwordHash: string },
+  user: { email: string; name: string; passwordHash: string | null },
 ): Promise<{ id: string } | null> {
-  try {
-    const [row] = await db('users')
-      .insert({ email: user.email, name: user.name, password_hash: user.passwordHash })
-      .returning('id');
-    return row ?? null;
-  } catch (error) {
-    if (isUniqueViolation(error, 'users_email_unique')) return null;
-    throw error;
-  }
+  const [row] = await db('users')
+    .insert({ email: user.email, name: user.name, password_hash: user.passwordHash })
+    .onConflict()
+    .ignore()
+    .returning('id');
+  return row ?? null;
 }
 
 export async function findCredentialsByEmail(db: Knex, email: string): Promise<Credentials | null> {

@@ -1,5 +1,4 @@
 import { z } from 'zod';
-import { passwordProblem } from '@/lib/access/password-rule';
 import { nameField } from '@/lib/schemas/number-field';
 
 export const emailField = z
@@ -13,12 +12,7 @@ export const tokenNameField = nameField('Name of the token', 60);
 
 const givenPassword = z.string({ error: 'Password: give it.' }).min(1, { error: 'Password: give it.' }).max(1000);
 
-export const registrationSchema = z
-  .object({ email: emailField, name: personNameField, password: z.string({ error: 'Password: give one.' }) })
-  .superRefine(({ email, password }, context) => {
-    const problem = passwordProblem(password, email);
-    if (problem) context.addIssue({ code: 'custom', path: ['password'], message: problem });
-  });
+export const registrationSchema = z.object({ email: emailField, name: personNameField });
 
 export const signInSchema = z.object({ email: emailField, password: givenPassword });
 export const resetRequestSchema = z.object({ email: emailField });

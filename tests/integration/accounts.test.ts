@@ -21,18 +21,29 @@ afterAll(() => database.drop());
 const password = 'a quiet anchorage';
 const anEmail = () => `visitor-${randomUUID()}@example.org`;
 
+/** The token of the newest link in somebody's mail. */
+function tokenIn(mails: readonly { readonly text: string }[]): string {
+  return /\/reset\/(\S+)/.exec(mails[mails.length - 1]!.text)![1]!;
+}
+
+/** Registered, and the password chosen by the mailed link. Four more mails may go to the address this hour. */
 async function registered() {
   const visitor = aVisitor(database.db);
   const email = anEmail();
-  await registerAccount(visitor, { email, name: 'Visitor', password });
+  await registerAccount(visitor, { email, name: 'Visitor' });
+  await resetPassword(visitor, { token: tokenIn(visitor.sent), password });
   return { visitor, email };
 }
 
 describe('registering', () => {
-  it('makes an account that can sign in, in any case of letters', async () => {
-    const { visitor, email } = await registered();
-    expect(await signIn(visitor, { email: email.toUpperCase(), password })).toMatchObject({ email, name: 'Visitor' });
+  it('makes an account that can sign in, in any case of letters, once its password is chosen by mail', async () => {
+    const visitor = aVisitor(database.db);
+    const email = anEmail();
+    await registerAccount(visitor, { email, name: 'Visitor' });
     expect(visitor.sent).toMatchObject([{ to: email, subject: 'Your Twobow account' }]);
+    expect(await signIn(visitor, { email, password })).toBeNull();
+    await resetPassword(visitor, { token: tokenIn(visitor.sent), password });
+    expect(await signIn(visitor, { email: email.toUpperCase(), password })).toMatchObject({ email, name: 'Visitor' });
     const row = await database.db('users').where({ email }).first();
     expect(row!.password_hash).toMatch(/^\$argon2id\$v=19\$m=65536,t=3,p=1\$/);
   });
@@ -40,22 +51,44 @@ describe('registering', () => {
   it('with an e-mail that exists answers the same, changes nothing and tells its holder', async () => {
     const { email } = await registered();
     const somebody = aVisitor(database.db);
-    const answer = await registerAccount(somebody, { email, name: 'Thief', password: 'another long one' });
+    const answer = await registerAccount(somebody, { email, name: 'Thief' });
     expect(answer).toBeUndefined();
-    expect(await signIn(somebody, { email, password: 'another long one' })).toBeNull();
     expect(await signIn(somebody, { email, password })).toMatchObject({ name: 'Visitor' });
     expect(somebody.sent).toHaveLength(1);
     expect(somebody.sent[0]).toMatchObject({ to: email, subject: 'Your Twobow account' });
     expect(somebody.sent[0]!.text).toContain('has an account already');
+    expect(somebody.sent[0]!.text).not.toContain('/reset/');
   });
 
-  it('refuses a password that is short or the e-mail itself', async () => {
+  it('again before the password is chosen sends a new link, and the old one is dead', async () => {
+    const visitor = aVisitor(database.db);
     const email = anEmail();
+    await registerAccount(visitor, { email, name: 'Visitor' });
+    const first = tokenIn(visitor.sent);
+    await registerAccount(visitor, { email, name: 'Visitor' });
+    const again = resetPassword(visitor, { token: first, password });
+    await expect(again).rejects.toMatchObject({ status: 422, fields: [{ pointer: '/token' }] });
+    await resetPassword(visitor, { token: tokenIn(visitor.sent), password });
+    expect(await signIn(visitor, { email, password })).not.toBeNull();
+  });
+
+  it('leaves a link that is dead after a day', async () => {
+    const visitor = aVisitor(database.db);
+    await registerAccount(visitor, { email: anEmail(), name: 'Visitor' });
+    const later = { ...visitor, now: new Date(visitor.now.getTime() + 24 * 3_600_000 + 1) };
+    const late = resetPassword(later, { token: tokenIn(visitor.sent), password });
+    await expect(late).rejects.toMatchObject({ status: 422, fields: [{ pointer: '/token' }] });
+  });
+
+  it('refuses a first password that is short or the e-mail itself', async () => {
+    const visitor = aVisitor(database.db);
+    const email = anEmail();
+    await registerAccount(visitor, { email, name: 'Visitor' });
     for (const bad of ['eleven char', email, email.toUpperCase()]) {
-      const attempt = registerAccount(aVisitor(database.db), { email, name: 'Visitor', password: bad });
+      const attempt = resetPassword(visitor, { token: tokenIn(visitor.sent), password: bad });
       await expect(attempt).rejects.toMatchObject({ status: 422, fields: [{ pointer: '/password' }] });
     }
-    expect(await database.db('users').where({ email }).first()).toBeUndefined();
+    expect(await signIn(visitor, { email, password: 'eleven char' })).toBeNull();
   });
 });
 
@@ -142,8 +175,7 @@ describe('a forgotten password', () => {
     const { visitor, email } = await registered();
     const before = (await signIn(visitor, { email, password }))!;
     await requestPasswordReset(visitor, email);
-    const token = /\/reset\/(\S+)/.exec(visitor.sent.at(-1)!.text)![1]!;
-    return { visitor, email, before, token };
+    return { visitor, email, before, token: tokenIn(visitor.sent) };
   }
   const fresh = 'the wind came round';
 
@@ -189,7 +221,7 @@ describe('a forgotten password', () => {
   });
 
   it('is throttled by account alike whether it exists', async () => {
-    const { email } = await registered(); // its welcome is the first of five mails an hour
+    const { email } = await registered(); // its first link is the first of five mails an hour
     const nobody = anEmail();
     for (let i = 0; i < 4; i += 1) await requestPasswordReset(aVisitor(database.db), email);
     for (let i = 0; i < 5; i += 1) await requestPasswordReset(aVisitor(database.db), nobody);

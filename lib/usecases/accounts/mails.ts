@@ -3,14 +3,17 @@ import type { Mail } from '@/lib/usecases/context';
 /** Minutes for which a reset link works. */
 export const RESET_MINUTES = 60;
 
-export function welcomeMail({ email }: { email: string }, origin: string): Mail {
+/** Hours for which the first link of a new account works. */
+export const WELCOME_HOURS = 24;
+
+export function welcomeMail({ email, token }: { email: string; token: string }, origin: string): Mail {
   return {
     to: email,
     subject: 'Your Twobow account',
     text: paragraphs(
-      'An account was made for this e-mail address.',
-      `Sign in: ${origin}/sign-in`,
-      `Was it not you? Then set a password of your own, and the account is yours alone: ${origin}/forgot`,
+      'Somebody registered with this e-mail address. Was it you? Then choose a password:',
+      `${origin}/reset/${token}`,
+      `The link works once and for ${WELCOME_HOURS} hours; register again for a new one. Was it not you? Then there is nothing to do: nobody can sign in.`,
     ),
   };
 }
