@@ -7,6 +7,7 @@ import type { BoatSheet } from '@/lib/schemas/boat-sheet';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { LegCards } from './leg-cards';
 import { legFacts } from './leg-facts';
+import { LightLine } from './light-line';
 import { LegsTable } from './legs-table';
 import { NotebookSection } from './notebook-section';
 import { Reasons } from './reasons';
@@ -35,7 +36,10 @@ export function ResultView({ result, plan, sheet, selectedLeg, onSelectLeg }: Re
   const shared = { facts, workingMargin: sheet.workingMargin, selectedLeg, onSelectLeg };
   return (
     <div className="space-y-8">
-      <Totals result={result} departure={plan.departure} zone={plan.zone} />
+      <div>
+        <Totals result={result} departure={plan.departure} zone={plan.zone} />
+        <LightLine start={plan.route[0]!} departure={plan.departure} zone={plan.zone} />
+      </div>
       <NotebookSection title="Legs" anchor="legs">
         <LegsTable {...shared} />
         <LegCards {...shared} />
