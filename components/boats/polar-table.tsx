@@ -1,5 +1,7 @@
 import { Cell, DataTable, HeadCell } from '@/components/ui/data-table';
+import { Disclosure } from '@/components/ui/disclosure';
 import { Panel } from '@/components/ui/panel';
+import { writePolarCsv } from '@/lib/polars/write-polar-csv';
 import type { Polar } from '@/lib/polars/polar';
 import { figure } from './show';
 
@@ -34,6 +36,11 @@ export function PolarTable({ polar }: { readonly polar: Polar }) {
           ))}
         </tbody>
       </DataTable>
+      <Disclosure summary="The same as CSV">
+        <pre className="overflow-x-auto text-sm" tabIndex={0}>
+          {writePolarCsv(polar)}
+        </pre>
+      </Disclosure>
     </Panel>
   );
 }

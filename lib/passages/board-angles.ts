@@ -1,9 +1,6 @@
 import type { Boat } from '@/lib/passages/passage';
-import { bestAngleDown, bestAngleUp } from '@/lib/polars/best-angles';
+import { bestAngleDown, bestAngleUp, DEEPEST_BY_RECKONING_DEG } from '@/lib/polars/best-angles';
 import type { Degrees, Knots } from '@/lib/units/quantities';
-
-/** Never deeper by reckoning alone, so that a wave or a shift cannot bring the wind to the wrong side. docs/model.md §5. */
-export const DEEPEST_BY_RECKONING_DEG = 150;
 
 export interface BoardAngles {
   readonly closestDeg: Degrees;

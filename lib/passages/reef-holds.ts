@@ -1,5 +1,5 @@
 import type { Boat } from '@/lib/passages/passage';
-import { DEEPEST_BY_RECKONING_DEG } from '@/lib/passages/board-angles';
+import { DEEPEST_BY_RECKONING_DEG } from '@/lib/polars/best-angles';
 import { polarSpeedKn } from '@/lib/polars/boat-speed';
 import type { Reef } from '@/lib/rigging/craft';
 import { holdsUpToKn, type HoldsUpTo } from '@/lib/rigging/holds-up-to';

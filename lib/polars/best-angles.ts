@@ -13,7 +13,7 @@ export interface BestAngle {
 }
 
 /** A wave or a shift must not bring the wind to the wrong side: the deepest angle where the owner gives none. Judgement, no source. */
-export const DEEPEST_DEFAULT_DEG: Degrees = 150;
+export const DEEPEST_BY_RECKONING_DEG: Degrees = 150;
 
 /** The angle up to 90° of the best speed made good to windward in this wind. Source: docs/model.md §5. */
 export function bestAngleUp(polar: Polar, windKn: Knots): BestAngle {
@@ -21,7 +21,7 @@ export function bestAngleUp(polar: Polar, windKn: Knots): BestAngle {
 }
 
 /** The angle from 90° to the deepest of the best speed made good down wind in this wind. Source: docs/model.md §5. */
-export function bestAngleDown(polar: Polar, windKn: Knots, deepestDeg: Degrees = DEEPEST_DEFAULT_DEG): BestAngle {
+export function bestAngleDown(polar: Polar, windKn: Knots, deepestDeg: Degrees = DEEPEST_BY_RECKONING_DEG): BestAngle {
   return bestAngle(polar, windKn, 90, deepestDeg, -1);
 }
 

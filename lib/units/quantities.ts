@@ -6,10 +6,8 @@
 type Quantity<Unit extends string> = number & { readonly __unit?: Unit };
 
 export type Knots = Quantity<'kn'>;
-export type MetresPerSecond = Quantity<'m/s'>;
 export type Metres = Quantity<'m'>;
 export type SquareMetres = Quantity<'m2'>;
-export type CubicMetres = Quantity<'m3'>;
 export type Litres = Quantity<'L'>;
 export type NauticalMiles = Quantity<'nmi'>;
 export type Kilograms = Quantity<'kg'>;

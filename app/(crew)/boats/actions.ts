@@ -21,7 +21,7 @@ export async function saveBoat(request: SaveBoatRequest): Promise<SaveBoatAnswer
 
 export async function putAway(form: FormData): Promise<void> {
   const context = await pageContext('/boats');
-  await hideBoat(context, String(form.get('boatId')));
+  await hideBoat(context, String(form.get('id')));
   revalidatePath('/boats', 'layout');
   redirect('/boats');
 }
@@ -30,7 +30,7 @@ export async function putAway(form: FormData): Promise<void> {
 export async function bringBack(form: FormData): Promise<void> {
   const context = await pageContext('/boats');
   try {
-    await restoreBoat(context, String(form.get('boatId')));
+    await restoreBoat(context, String(form.get('id')));
   } catch (error) {
     if (!(error instanceof NotFoundError)) throw error;
   }

@@ -1,8 +1,9 @@
 import type { Metadata } from 'next';
 import { BoatList } from '@/components/boats/boat-list';
-import { HiddenBoats } from '@/components/boats/hidden-boats';
 import { ButtonLink } from '@/components/ui/button';
 import { PageTitle } from '@/components/ui/page-title';
+import { PutAwayList } from '@/components/ui/put-away-list';
+import { can } from '@/lib/access/can';
 import { listBoats } from '@/lib/usecases/boats/list-boats';
 import { pageContext } from '@/lib/web/contexts';
 import { bringBack } from './actions';
@@ -15,7 +16,7 @@ export default async function BoatsPage() {
     <>
       <PageTitle title="Boats" actions={<ButtonLink href="/boats/new">New boat</ButtonLink>} />
       <BoatList boats={boats} />
-      <HiddenBoats boats={hidden} bringBack={bringBack} />
+      <PutAwayList items={hidden.filter(({ role }) => can(role, 'hide-boat'))} bringBack={bringBack} />
     </>
   );
 }

@@ -7,11 +7,11 @@ import { lockPassage, updatePassage } from '@/db/stores/passage-store';
 import { ConflictError, NotFoundError } from '@/lib/errors';
 import type { LandIndex } from '@/lib/geo/land';
 import { checkPassage } from '@/lib/passage-check/check-passage';
+import { worstLegIndex } from '@/lib/passage-check/describe';
 import type { PassagePlan } from '@/lib/schemas/passage-plan';
 import { planToPassage } from '@/lib/schemas/to-passage';
 import type { Context } from '@/lib/usecases/context';
 import { requirePassage } from '@/lib/usecases/passages/require-passage';
-import { worstLegPosition } from '@/lib/usecases/passages/worst-leg-position';
 
 export interface SavedPassage {
   readonly revision: number;
@@ -52,7 +52,7 @@ export async function savePassage(
       asOf: now,
       inputs: plan,
       result,
-      worstLegPosition: worstLegPosition(result.legs),
+      worstLegPosition: worstLegIndex(result.legs),
       checkedBy: user.id,
     });
     await insertAuditEvent(trx, {

@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
 import { CrewPanel } from '@/components/boats/crew-panel';
-import { PutAway } from '@/components/boats/put-away';
+import { PutAway } from '@/components/ui/put-away';
 import { SheetReading } from '@/components/boats/sheet-reading';
 import { VersionsPanel } from '@/components/boats/versions-panel';
 import { ButtonLink } from '@/components/ui/button';
@@ -45,7 +45,12 @@ export default async function BoatPage({ params, searchParams }: PageProps) {
       <SheetReading sheet={version.sheet}>
         <VersionsPanel boatId={boatId} versions={versions} shownNumber={version.number} />
         <CrewPanel members={members}>
-          {can(role, 'hide-boat') && <PutAway boatId={boatId} name={name} putAway={putAway} />}
+          {can(role, 'hide-boat') && (
+            <PutAway id={boatId} what="boat" name={name} putAway={putAway}>
+              {name} and her passages go out of sight, for her crew too. You can bring her back from the list of boats
+              for 30 days.
+            </PutAway>
+          )}
         </CrewPanel>
       </SheetReading>
     </>

@@ -2,11 +2,13 @@ import type { Metadata } from 'next';
 import { PassageReading } from '@/components/passages/passage-reading';
 import { ButtonLink } from '@/components/ui/button';
 import { PageTitle } from '@/components/ui/page-title';
+import { PutAway } from '@/components/ui/put-away';
 import { can } from '@/lib/access/can';
 import { openBoat } from '@/lib/usecases/boats/open-boat';
 import { openPassage } from '@/lib/usecases/passages/open-passage';
 import { pageContext } from '@/lib/web/contexts';
 import { orNotFound } from '@/lib/web/or-not-found';
+import { putAway } from '../actions';
 
 interface PageProps {
   readonly params: Promise<{ passageId: string }>;
@@ -34,6 +36,14 @@ export default async function PassagePage({ params }: PageProps) {
         mayWrite={mayWrite}
         nowMs={context.now.getTime()}
       />
+      {can(role, 'hide-passage') && (
+        <div className="mt-8 print:hidden">
+          <PutAway id={passageId} what="passage" name={passage.name} putAway={putAway}>
+            {passage.name} goes out of sight, for the crew too. You can bring it back from the list of passages for 30
+            days.
+          </PutAway>
+        </div>
+      )}
     </>
   );
 }
