@@ -15,10 +15,12 @@ export function reefCallsByLeg({ prepared, legs }: FollowedPassage): readonly (r
   if (!last) return legs.map(() => []);
   const calls = callsOverTime(needsOf(samples), Math.max(last.time, endOf(legs)));
   const { reefs } = prepared.boat;
-  return legs.map((leg) => {
+  return legs.map((leg, index) => {
     const { followed } = leg;
     if (!followed || followed.samples.length === 0) return [];
-    const until = followed.end ?? Number.POSITIVE_INFINITY;
+    // What is asked for at the waypoint itself belongs to the leg that starts there; at the last one nothing starts.
+    const goesOn = (legs[index + 1]?.followed?.samples.length ?? 0) > 0;
+    const until = goesOn ? (followed.end ?? Number.POSITIVE_INFINITY) : Number.POSITIVE_INFINITY;
     const own = calls.filter((call) => call.by >= followed.start && call.by < until);
     const listed = own.length > 0 ? own : [carriedInto(calls, followed.start)];
     return listed.map((call) => describeCall(call, samples, reefs));

@@ -1,12 +1,13 @@
 import { mercatorOffsetM } from '@/lib/geo/mercator';
-import { rhumbDirect, rhumbInverse } from '@/lib/geo/rhumb';
-import { add, directionOf, dot, lengthOf, scale, vectorFrom, type Vector } from '@/lib/geo/vector';
+import { rhumbInverse } from '@/lib/geo/rhumb';
+import { add, dot, lengthOf, scale, vectorFrom, type Vector } from '@/lib/geo/vector';
 import { conditionsAt, type Conditions } from '@/lib/passages/conditions';
 import { decide, decisionWith, type Decision } from '@/lib/passages/decide';
 import type { Passage } from '@/lib/passages/passage';
 import type { PreparedBoat } from '@/lib/passages/prepared-boat';
 import type { FollowedLeg, Sample, Shunt, StopReason, TrackPoint } from '@/lib/passages/sample';
-import { shuntDisplacementM, type End, type Place, type Sailing } from '@/lib/passages/sailing';
+import { shuntDisplacementM, type End, type Place } from '@/lib/passages/sailing';
+import { moved, sameDecision, sameWay, type Step } from '@/lib/passages/step';
 import { closestApproach, hasRoom, turnOutlook, type Corridor } from '@/lib/passages/turns';
 import { METRES_PER_NMI, M_S_PER_KNOT, MS_PER_HOUR, MS_PER_MINUTE } from '@/lib/units/constants';
 import type { EpochMs, Knots } from '@/lib/units/quantities';
@@ -21,6 +22,7 @@ const ARRIVED_WITHIN_M = 0.5;
 const SLOW_KN = 0.2;
 const SLOW_FOR_MS = 6 * MS_PER_HOUR;
 const MOST_STEPS = 6000;
+const CHANGE_FOUND_WITHIN_MS = 500;
 
 export interface Voyage {
   readonly passage: Passage;
@@ -119,12 +121,10 @@ class LegFollower {
     let step = this.planStep(decision, longest, 0);
     step = this.planStep(decision, longest, step.ms);
     let arrived = step.arrives;
-    if (!step.event) {
-      const changedAt = this.firstChangeMs(decision, step.overGroundKn, step.ms);
-      if (changedAt !== null) {
-        step = { ...step, ms: changedAt };
-        arrived = false;
-      }
+    const changedAt = this.firstChangeMs(decision, step);
+    if (changedAt !== null) {
+      step = { ...step, ms: changedAt };
+      arrived = false;
     }
     this.track.push({ ...this.place, time: this.time, end: this.end ?? 'A' });
     const slow = step.madeGoodKn < SLOW_KN;
@@ -136,7 +136,7 @@ class LegFollower {
   }
 
   /** Length of the step and the velocity over it, taken at its middle: second order in wind and stream. */
-  private planStep(decision: Decision, longestMs: number, guessMs: number) {
+  private planStep(decision: Decision, longestMs: number, guessMs: number): Step {
     const middle = conditionsAt(this.voyage.passage, this.time + (guessMs || longestMs) / 2);
     const at = middle.known ? this.decideLike(decision, middle.conditions) : decision;
     const { sailing } = at;
@@ -179,22 +179,27 @@ class LegFollower {
     return sameWay(there.sailing, decision.sailing) ? there : decision;
   }
 
-  /** When within the step the reef or the way of sailing first changes, ms from now; records the last instant before it. */
-  private firstChangeMs(decision: Decision, overGroundKn: Vector, stepMs: number): number | null {
-    const sampleAt = (ms: number) => {
-      const there = conditionsAt(this.voyage.passage, this.time + ms);
+  /**
+   * When within the step the reef or the way of sailing first changes, ms from now; records the last instant before it.
+   * A step that ends in a turn or at the waypoint changes the way by itself: there only the reef is looked at, short of
+   * the end.
+   */
+  private firstChangeMs(decision: Decision, { ms, event, overGroundKn }: Step): number | null {
+    const sampleAt = (after: number) => {
+      const there = conditionsAt(this.voyage.passage, this.time + after);
       if (!there.known) return null;
-      const place = moved(this.place, overGroundKn, ms);
+      const place = moved(this.place, overGroundKn, after);
       return { place, conditions: there.conditions, decision: this.decideAt(there.conditions, place) };
     };
-    const differs = (ms: number) => {
-      const there = sampleAt(ms);
-      return there !== null && !sameDecision(there.decision, decision);
+    const differs = (after: number) => {
+      const there = sampleAt(after);
+      if (!there) return false;
+      return event ? there.decision.reefIndex !== decision.reefIndex : !sameDecision(there.decision, decision);
     };
-    if (!differs(stepMs)) return null;
+    let high = event ? ms - CHANGE_FOUND_WITHIN_MS : ms;
+    if (high <= 0 || !differs(high)) return null;
     let low = 0;
-    let high = stepMs;
-    while (high - low > 500) {
+    while (high - low > CHANGE_FOUND_WITHIN_MS) {
       const middle = (low + high) / 2;
       if (differs(middle)) high = middle;
       else low = middle;
@@ -273,17 +278,4 @@ class LegFollower {
     const next = this.voyage.breakpoints.find((time) => time > this.time);
     return next === undefined ? LONGEST_STEP_MS : next - this.time;
   }
-}
-
-function moved(place: Place, overGroundKn: Vector, ms: number): Place {
-  const distanceM = (lengthOf(overGroundKn) * M_S_PER_KNOT * ms) / 1000;
-  return distanceM === 0 ? place : rhumbDirect(place, directionOf(overGroundKn), distanceM);
-}
-
-function sameWay(a: Sailing, b: Sailing): boolean {
-  return a.mode === b.mode && a.end === b.end;
-}
-
-function sameDecision(a: Decision, b: Decision): boolean {
-  return a.reefIndex === b.reefIndex && sameWay(a.sailing, b.sailing);
 }

@@ -126,6 +126,42 @@ describe('steady wind, against closed forms', () => {
   });
 });
 
+describe('a wind that rises, against closed forms', () => {
+  /** Mean 10 to 16 kn, gust 13 to 22 kn in six hours from the south, against 1.2 kn of stream. */
+  function rising(nmi: number) {
+    const request = completeRequest();
+    request.route = routeOf([{ courseDeg: 45, nmi }]);
+    request.wind.rows = [
+      { time: new Date(DEPARTURE).toISOString(), fromDeg: 180, meanKn: 10, gustKn: 13 },
+      { time: new Date(DEPARTURE + 6 * HOUR_MS).toISOString(), fromDeg: 180, meanKn: 16, gustKn: 22 },
+    ];
+    request.stream = steadyStream(180, 1.2);
+    return check(request).legs[0]!;
+  }
+
+  // Beam-on at rest: 1.5 × ½·1.225·1.4·(V·1852/3600)²·10.4·(2.5 + 0.45) = 3197.95 N·m at V = 17.4986 kn over the
+  // water, 16.2986 over the ground, so (16.2986 − 13) / 9 of six hours after the departure.
+  const neededAfterMin = ((16.2986 - 13) / 9) * 360;
+
+  it('asks for the deeper reef to the minute, and calls it a quarter of an hour before', () => {
+    const calls = rising(14).reefCalls;
+    expect(calls.map((call) => call.reef)).toEqual(['first', 'second']);
+    expect(Math.abs((Date.parse(calls[1]!.by) - DEPARTURE) / 60_000 - neededAfterMin)).toBeLessThan(0.05);
+    expect(Date.parse(calls[1]!.by) - Date.parse(calls[1]!.at)).toBe(15 * 60_000);
+    expect(calls[1]!.gustKn).toBeCloseTo(16.2986, 2);
+  });
+
+  it('finds it also in the last minute before the waypoint', () => {
+    // 12 nmi end 0.6 min after the need; the load share has just reached 1/1.5 then.
+    const leg = rising(12);
+    const endsAfterMin = (Date.parse(leg.end!) - DEPARTURE) / 60_000;
+    expect(endsAfterMin).toBeGreaterThan(neededAfterMin);
+    expect(endsAfterMin).toBeLessThan(neededAfterMin + 1);
+    expect(leg.reefCalls.map((call) => call.reef)).toEqual(['first', 'second']);
+    expect(leg.largestLoadShare).toBeCloseTo(1 / 1.5, 3);
+  });
+});
+
 describe('what is not known', () => {
   it('says so from where the wind ends, for the leg and all after it', () => {
     const request = completeRequest();
